@@ -52,6 +52,8 @@ Status WriteFile(const std::filesystem::path& path, std::string_view text) {
   }
   std::filesystem::rename(aside, path, failed);
   if (failed) {
+    std::error_code ignored;
+    std::filesystem::remove(aside, ignored);
     return Unavailable(fmt::format(
         "{}: cannot be written: {}", path.string(), failed.message()));
   }

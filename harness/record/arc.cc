@@ -1,18 +1,20 @@
 #include "harness/record/arc.h"
 
 #include <fmt/format.h>
+#include <fmt/ranges.h>
 
 namespace gatedyno {
 
 std::string DescribeArc(const Arc& arc) {
-  std::string text =
-      fmt::format("{}->{} {}", arc.pin, arc.output, EdgeName(arc.edge));
+  return fmt::format("{}->{} {}", arc.pin, arc.output, EdgeName(arc.edge));
+}
+
+std::string DescribeSide(const Arc& arc) {
+  std::vector<std::string> parts;
   for (const SideInput& side : arc.side) {
-    const bool first = &side == &arc.side.front();
-    text +=
-        fmt::format("{} {}={}", first ? "," : "", side.pin, side.high ? 1 : 0);
+    parts.push_back(fmt::format("{}={}", side.pin, side.high ? 1 : 0));
   }
-  return text;
+  return fmt::format("{}", fmt::join(parts, " "));
 }
 
 }  // namespace gatedyno

@@ -30,8 +30,11 @@ struct Arc {
   bool operator==(const Arc&) const = default;
 };
 
-// "a->y fall, b=1 c=0".
+// "a->y fall".
 std::string DescribeArc(const Arc& arc);
+
+// "b=1 c=0".
+std::string DescribeSide(const Arc& arc);
 
 }  // namespace gatedyno
 

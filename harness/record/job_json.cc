@@ -1,16 +1,46 @@
 #include "harness/record/job_json.h"
 
+#include <stdexcept>
+#include <string>
+
 #include <fmt/format.h>
 
 namespace gatedyno {
 
-NLOHMANN_JSON_SERIALIZE_ENUM(Edge,
-                             {{Edge::kRise, "rise"}, {Edge::kFall, "fall"}})
-NLOHMANN_JSON_SERIALIZE_ENUM(Ending,
-                             {{Ending::kMeasured, "measured"},
-                              {Ending::kFailed, "failed"},
-                              {Ending::kTimedOut, "timed out"},
-                              {Ending::kCrashed, "crashed"}})
+namespace {
+
+// The library's own enum macro reads an unknown word as the first value: a
+// reply of another build would end as measured.
+template <class Enum, size_t kCount, class Name>
+Enum Named(const nlohmann::json& json,
+           const Enum (&values)[kCount],
+           const Name& name) {
+  const auto& word = json.get_ref<const std::string&>();
+  for (const Enum value : values) {
+    if (name(value) == word) {
+      return value;
+    }
+  }
+  throw std::invalid_argument(fmt::format("'{}' is none of its words", word));
+}
+
+}  // namespace
+
+static void to_json(nlohmann::json& json, Edge edge) {
+  json = EdgeName(edge);
+}
+static void from_json(const nlohmann::json& json, Edge& edge) {
+  edge = Named(json, {Edge::kRise, Edge::kFall}, EdgeName);
+}
+static void to_json(nlohmann::json& json, Ending ending) {
+  json = EndingName(ending);
+}
+static void from_json(const nlohmann::json& json, Ending& ending) {
+  ending = Named(
+      json,
+      {Ending::kMeasured, Ending::kFailed, Ending::kTimedOut, Ending::kCrashed},
+      EndingName);
+}
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(Crossing, net, level_v, edge, occurrence)
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(Interval, name, from, to)
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(SwingCheck, net, low_v, high_v)
@@ -21,12 +51,12 @@ NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(
 
 namespace {
 
-// nlohmann_json reports a missing or mistyped field by exception only.
+// A missing, mistyped or unknown field is reported by exception only.
 template <class T>
 Result<T> Read(const nlohmann::json& json, const char* what) {
   try {
     return json.get<T>();
-  } catch (const nlohmann::json::exception& thrown) {
+  } catch (const std::exception& thrown) {
     return Internal(fmt::format("not a {}: {}", what, thrown.what()));
   }
 }

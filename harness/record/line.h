@@ -18,6 +18,9 @@ struct Estimate {
   // own stage effort, which the netlist fixes.  Unset, the first stage's effort
   // is effort * h.  It is what the driving stages match.
   std::optional<double> fixed_first_effort;
+  // The part of both p that is effort at loads inside the cell: in units of
+  // tau, not of p_inv.  p in tau = (p - inner_effort) * p_inv + inner_effort.
+  double inner_effort = 0.0;
 };
 
 // What one job measured, at one fanout.
@@ -32,17 +35,19 @@ struct Point {
 struct Line {
   double slope_s = 0.0;
   double intercept_s = 0.0;
-  double slope_u_s = 0.0;  // Standard errors, one sigma.
-  double intercept_u_s = 0.0;
-  double covariance_s2 = 0.0;  // Of slope and intercept.
+  // Standard errors, one sigma, and the covariance of slope and intercept.
+  // None for two points: any two lie on a line, so they say nothing of error.
+  std::optional<double> slope_u_s = std::nullopt;
+  std::optional<double> intercept_u_s = std::nullopt;
+  std::optional<double> covariance_s2 = std::nullopt;
   double largest_residual_s = 0.0;
   int points = 0;
 };
 
-// A number and its standard uncertainty (one sigma).
+// A number and its standard uncertainty (one sigma); none when unknown.
 struct Measured {
   double value = 0.0;
-  double u = 0.0;
+  std::optional<double> u = std::nullopt;
 };
 
 }  // namespace gatedyno

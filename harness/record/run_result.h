@@ -1,0 +1,60 @@
+// All that one run of a plan gave: what every report is made of.
+
+#ifndef GATEDYNO_RECORD_RUN_RESULT_H_
+#define GATEDYNO_RECORD_RUN_RESULT_H_
+
+#include <string>
+#include <vector>
+
+#include "harness/record/comparison.h"
+
+namespace gatedyno {
+
+// What a report says of a cell above its arcs.
+struct CellSummary {
+  std::string name;
+  std::vector<std::string> functions;  // "y = !(a & b)", one an output.
+  int stages = 1;
+  int tallest_pull_down = 0;
+  int tallest_pull_up = 0;
+};
+
+struct FailedJob {
+  std::string key;
+  std::string label;
+  std::string message;
+};
+
+struct JobCounts {
+  int wanted = 0;  // Distinct jobs of the plan.
+  int reused = 0;  // Already measured in the store.
+  int simulated = 0;
+  int failed = 0;
+};
+
+// How the run was made; enough to make it again.
+struct RunFacts {
+  std::string title;
+  std::string node;  // Name.
+  std::string node_title;
+  Drive drive = Drive::kMatched;
+  std::vector<double> fanouts;
+  Tolerance tolerance;
+  std::string program;  // "gatedyno 0.1.0".
+  std::string simulator;
+  std::string started;  // ISO 8601, UTC.
+};
+
+struct RunResult {
+  RunFacts facts;
+  std::vector<CellSummary> cells;         // In plan order.
+  std::vector<Calibration> calibrations;  // One a corner that has one.
+  std::vector<Comparison> comparisons;    // By corner, cell, arc.
+  std::vector<FailedJob> failed_jobs;
+  std::vector<std::string> warnings;
+  JobCounts jobs;
+};
+
+}  // namespace gatedyno
+
+#endif  // GATEDYNO_RECORD_RUN_RESULT_H_
