@@ -7,6 +7,20 @@
 // `//` (inline); `{...}`, '...' and bare parameter expressions.  Anything else
 // is an error at file:line:column with the line and a caret below it: nothing
 // is skipped in silence.
+//
+// Where dialects differ:
+//  - "1a", "4k7" and letters that are no unit ("2x", "1milli") are errors.
+//  - w is the total width over the fingers.
+//  - .option scale stands outside .subckt and holds for the whole file.
+//  - m= on an X line multiplies everything inside, unless the .subckt declares
+//    a parameter m.
+//  - A .subckt sees its own parameters, the file's and the node's, not its
+//    caller's; definitions may stand in any order.
+//  - Net 0 is the ground where "0" is a ground name: joined with the ground
+//    pin, or a last pin of its own.
+//  - sa, sb, sd, sc, sca, scb, scc, nrd and nrs are accepted, not used, and
+//    named in one warning a cell.
+//  - After .end only comments may follow.
 
 #ifndef GATEDYNO_NETLIST_READER_H_
 #define GATEDYNO_NETLIST_READER_H_
@@ -42,7 +56,7 @@ struct DeviceName {
   bool is_subcircuit = false;  // Written on X lines instead of M lines.
   DeviceParameterNames parameters;
   double unit_m = 1.0;  // Lengths are in this unit, areas in its
-                        // square.
+                        // square; a file's .option scale replaces it.
 };
 
 // What a netlist leaves to the process it is written for.
@@ -55,7 +69,8 @@ struct ReaderOptions {
   std::map<std::string, double> parameters;
   // Length where a device line has none.
   std::optional<double> default_length_m;
-  // Width of one fin, for NFIN=; without it NFIN is an error.
+  // Width of one fin, for NFIN= (fins of one finger); without it NFIN is an
+  // error.
   std::optional<double> fin_width_m;
 };
 
