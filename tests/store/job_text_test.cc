@@ -1,0 +1,45 @@
+#include "harness/store/job_text.h"
+
+#include <gtest/gtest.h>
+
+#include "tests/store/store_fixture.h"
+
+namespace gatedyno {
+namespace {
+
+TEST(JobTextTest, TheMeasuresHoldAllButTheColumns) {
+  const Job job = ExampleJob(4);
+  const std::string text = MeasuresToText(job);
+  EXPECT_EQ(text.find("nand2"), std::string::npos) << text;
+  EXPECT_EQ(text.find("deck"), std::string::npos) << text;
+  Job named;
+  named.key = job.key;
+  named.label = job.label;
+  named.deck = job.deck;
+  const Result<Job> back = JobFromText(named, text);
+  ASSERT_TRUE(back.ok());
+  EXPECT_EQ(back->key, job.key);
+  EXPECT_EQ(back->label, job.label);
+  EXPECT_EQ(back->deck, job.deck);
+  EXPECT_EQ(back->intervals, job.intervals);
+  EXPECT_EQ(back->swings, job.swings);
+  EXPECT_EQ(back->stop_s, job.stop_s);
+  EXPECT_EQ(back->time_limit_s, job.time_limit_s);
+}
+
+TEST(JobTextTest, AMessageThatIsNotUtf8IsKept) {
+  const Outcome outcome = EndedAs(Ending::kFailed, "singular matrix \xff at y");
+  const Result<Outcome> back = OutcomeFromText(OutcomeToText(outcome));
+  ASSERT_TRUE(back.ok());
+  EXPECT_EQ(back->message, "singular matrix \xEF\xBF\xBD at y");
+}
+
+TEST(JobTextTest, WhatIsNotJsonIsAnError) {
+  for (const char* text : {"", "{", "[]", "7"}) {
+    EXPECT_FALSE(OutcomeFromText(text).ok()) << text;
+    EXPECT_FALSE(JobFromText(Job(), text).ok()) << text;
+  }
+}
+
+}  // namespace
+}  // namespace gatedyno
