@@ -1,0 +1,9 @@
+#include "harness/cli/commands.h"
+
+namespace gatedyno {
+
+std::vector<Command> Commands() {
+  return {EstimateCommand(), RunCommand(), DeckCommand()};
+}
+
+}  // namespace gatedyno

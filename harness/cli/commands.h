@@ -1,0 +1,35 @@
+// The commands of the program: one table, one file a command.
+
+#ifndef GATEDYNO_CLI_COMMANDS_H_
+#define GATEDYNO_CLI_COMMANDS_H_
+
+#include <functional>
+#include <string>
+#include <vector>
+
+#include <CLI/CLI.hpp>
+
+#include "harness/base/result.h"
+#include "harness/cli/exit_code.h"
+
+namespace gatedyno {
+
+// Runs a command whose options have been parsed.
+using Action = std::function<Result<ExitCode>()>;
+
+struct Command {
+  std::string name;
+  std::string summary;
+  // Adds the command's options and says what to do once they are parsed.
+  std::function<Action(CLI::App& app)> add;
+};
+
+std::vector<Command> Commands();
+
+Command EstimateCommand();  // cmd_estimate.cc
+Command DeckCommand();      // cmd_deck.cc
+Command RunCommand();       // cmd_run.cc
+
+}  // namespace gatedyno
+
+#endif  // GATEDYNO_CLI_COMMANDS_H_

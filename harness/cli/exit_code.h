@@ -1,0 +1,25 @@
+// What the program's exit tells a script.
+
+#ifndef GATEDYNO_CLI_EXIT_CODE_H_
+#define GATEDYNO_CLI_EXIT_CODE_H_
+
+#include "harness/base/result.h"
+
+namespace gatedyno {
+
+enum ExitCode : int {
+  kAllWithin = 0,       // Everything asked for was done, and is within.
+  kSomeBeyond = 1,      // Measured, and somewhere beyond the tolerance or too
+                        // uncertain to tell.
+  kBadUsage = 2,        // An option, netlist, node or plan is wrong.
+  kNotAllMeasured = 3,  // Jobs that could not be measured.
+  kOwnFault = 4,        // Ours, or the system's.
+};
+
+inline ExitCode ExitCodeOf(const Error& error) {
+  return error.kind == ErrorKind::kBadInput ? kBadUsage : kOwnFault;
+}
+
+}  // namespace gatedyno
+
+#endif  // GATEDYNO_CLI_EXIT_CODE_H_

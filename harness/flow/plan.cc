@@ -1,0 +1,78 @@
+#include "harness/flow/plan.h"
+
+#include <set>
+
+#include <fmt/format.h>
+
+#include "harness/base/install.h"
+#include "harness/node/json_file.h"
+
+namespace gatedyno {
+namespace {
+
+using nlohmann::json;
+
+constexpr const char* kFormat = "gatedyno-plan/1";
+
+}  // namespace
+
+Result<Plan> LoadPlan(const std::filesystem::path& path) {
+  const Result<json> file =
+      ReadJsonFile(path, DecksFolder() / "plan.schema.json");
+  if (!file.ok()) {
+    return Forward(file);
+  }
+  const json& in = *file;
+  Plan plan;
+  plan.title = in.value("title", path.stem().string());
+  plan.node = in["node"];
+  plan.cells = in["cells"].get<std::vector<std::string>>();
+  plan.corners = in.value("corners", plan.corners);
+  plan.fanouts = in.value("fanouts", plan.fanouts);
+  plan.drive =
+      in.value("drive", "matched") == "self" ? Drive::kSelf : Drive::kMatched;
+  plan.all_side_vectors = in.value("side_vectors", "worst") == "all";
+  const json tolerances = in.value("tolerances", json::object());
+  plan.tolerance.effort = tolerances.value("effort", plan.tolerance.effort);
+  plan.tolerance.parasitic =
+      tolerances.value("parasitic", plan.tolerance.parasitic);
+  plan.folder = path.parent_path();
+  return plan;
+}
+
+json PlanToJson(const Plan& plan) {
+  return {{"format", kFormat},
+          {"title", plan.title},
+          {"node", plan.node},
+          {"cells", plan.cells},
+          {"corners", plan.corners},
+          {"fanouts", plan.fanouts},
+          {"drive", DriveName(plan.drive)},
+          {"side_vectors", plan.all_side_vectors ? "all" : "worst"},
+          {"tolerances",
+           {{"effort", plan.tolerance.effort},
+            {"parasitic", plan.tolerance.parasitic}}}};
+}
+
+Status CheckFanouts(const std::vector<double>& fanouts) {
+  constexpr double kLargest = 1000.0;
+  for (const double fanout : fanouts) {
+    if (!(fanout > 0.0 && fanout <= kLargest)) {
+      return BadInput(fmt::format(
+          "--fanouts: {}: must be above 0 and at most {}", fanout, kLargest));
+    }
+  }
+  std::set<double> seen;
+  for (const double fanout : fanouts) {
+    if (!seen.insert(fanout).second) {
+      return BadInput(fmt::format("--fanouts: {} is there twice", fanout));
+    }
+  }
+  if (fanouts.size() < 2) {
+    return BadInput(fmt::format(
+        "--fanouts: a line needs two different ones, got {}", fanouts.size()));
+  }
+  return Ok();
+}
+
+}  // namespace gatedyno

@@ -1,0 +1,42 @@
+// A plan: node, cells, corners, fanouts, drive and tolerances.
+
+#ifndef GATEDYNO_FLOW_PLAN_H_
+#define GATEDYNO_FLOW_PLAN_H_
+
+#include <filesystem>
+#include <string>
+#include <vector>
+
+#include <nlohmann/json.hpp>
+
+#include "harness/base/result.h"
+#include "harness/record/comparison.h"
+
+namespace gatedyno {
+
+struct Plan {
+  std::string title;
+  std::string node;                  // Name, or path from `folder`.
+  std::vector<std::string> cells;    // Names with * and ?, or paths.
+  std::vector<std::string> corners;  // Empty: the node's first.
+  std::vector<double> fanouts = {1, 2, 3, 4, 6};
+  Drive drive = Drive::kMatched;
+  bool all_side_vectors = false;
+  Tolerance tolerance;
+  // What relative paths start from: the plan file's folder.
+  std::filesystem::path folder;
+};
+
+// Fails with the JSON pointer of what is wrong.
+Result<Plan> LoadPlan(const std::filesystem::path& path);
+
+// As a plan file would say it; what the store keeps of a run.
+nlohmann::json PlanToJson(const Plan& plan);
+
+// Refuses what the schema refuses, for a plan made from command-line options:
+// "--fanouts: ...".
+Status CheckFanouts(const std::vector<double>& fanouts);
+
+}  // namespace gatedyno
+
+#endif  // GATEDYNO_FLOW_PLAN_H_

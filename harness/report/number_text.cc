@@ -1,0 +1,49 @@
+#include "harness/report/number_text.h"
+
+#include <cmath>
+
+#include <fmt/format.h>
+
+namespace gatedyno {
+
+std::string Picoseconds(double seconds) {
+  const double ps = seconds * 1e12;
+  const double size = std::abs(ps);
+  const int decimals = size < 10.0 ? 3 : size < 100.0 ? 2 : 1;
+  return fmt::format("{:.{}f} ps", ps, decimals);
+}
+
+std::string SignedPercent(double ratio) {
+  const double percent = ratio * 100.0;
+  return std::abs(percent) < 9.95 ? fmt::format("{:+.1f} %", percent)
+                                  : fmt::format("{:+.0f} %", percent);
+}
+
+std::string Percent(double ratio) {
+  return fmt::format("{:g} %", ratio * 100);
+}
+
+std::string WithUncertainty(const Measured& measured, int decimals) {
+  return measured.u ? fmt::format("{:.{}f} ±{:.{}f}",
+                                  measured.value,
+                                  decimals,
+                                  *measured.u,
+                                  decimals)
+                    : fmt::format("{:.{}f}", measured.value, decimals);
+}
+
+std::string FractionText(double value) {
+  constexpr int kLargestDenominator = 60;
+  constexpr double kExact = 1e-9;
+  for (int denominator = 1; denominator <= kLargestDenominator; ++denominator) {
+    const double numerator = std::round(value * denominator);
+    if (std::abs(value - numerator / denominator) <= kExact) {
+      return denominator == 1
+                 ? fmt::format("{:.0f}", numerator)
+                 : fmt::format("{:.0f}/{}", numerator, denominator);
+    }
+  }
+  return "";
+}
+
+}  // namespace gatedyno

@@ -1,0 +1,198 @@
+#include "harness/flow/plan.h"
+
+#include <string>
+#include <vector>
+
+#include <gtest/gtest.h>
+
+#include "tests/support/temporary_folder.h"
+
+namespace gatedyno {
+namespace {
+
+using nlohmann::json;
+
+json SmallPlan() {
+  return {{"format", "gatedyno-plan/1"}, {"node", "p45"}, {"cells", {"inv"}}};
+}
+
+class PlanTest : public ::testing::Test {
+ protected:
+  Result<Plan> Load(const json& plan) {
+    return LoadPlan(folder_.Write("night.json", plan.dump()));
+  }
+  std::string File() const { return (folder_.path() / "night.json").string(); }
+
+  TemporaryFolder folder_;
+};
+
+TEST_F(PlanTest, FillsInWhatIsLeftOut) {
+  const Result<Plan> plan = Load(SmallPlan());
+  ASSERT_TRUE(plan.ok()) << plan.error().message;
+  EXPECT_EQ(plan->title, "night");
+  EXPECT_EQ(plan->node, "p45");
+  EXPECT_EQ(plan->cells, std::vector<std::string>{"inv"});
+  EXPECT_TRUE(plan->corners.empty());
+  EXPECT_EQ(plan->fanouts, (std::vector<double>{1, 2, 3, 4, 6}));
+  EXPECT_EQ(plan->drive, Drive::kMatched);
+  EXPECT_FALSE(plan->all_side_vectors);
+  EXPECT_EQ(plan->tolerance.effort, Tolerance().effort);
+  EXPECT_EQ(plan->tolerance.parasitic, Tolerance().parasitic);
+  EXPECT_EQ(plan->folder, folder_.path());
+}
+
+json FullPlan() {
+  return {{"format", "gatedyno-plan/1"},
+          {"title", "gates of an interrupt arbiter"},
+          {"node", "nodes/my.json"},
+          {"cells", {"nand*", "cells/own.sp"}},
+          {"corners", {"typical", "slow_*"}},
+          {"fanouts", {0.5, 2, 4.5}},
+          {"drive", "self"},
+          {"side_vectors", "all"},
+          {"tolerances", {{"effort", 0.1}, {"parasitic", 0.2}}}};
+}
+
+TEST_F(PlanTest, TakesEverythingGivenAndSaysItAgain) {
+  const Result<Plan> plan = Load(FullPlan());
+  ASSERT_TRUE(plan.ok()) << plan.error().message;
+  EXPECT_EQ(plan->title, "gates of an interrupt arbiter");
+  EXPECT_EQ(plan->corners, (std::vector<std::string>{"typical", "slow_*"}));
+  EXPECT_EQ(plan->fanouts, (std::vector<double>{0.5, 2, 4.5}));
+  EXPECT_EQ(plan->drive, Drive::kSelf);
+  EXPECT_TRUE(plan->all_side_vectors);
+  EXPECT_EQ(plan->tolerance.effort, 0.1);
+  EXPECT_EQ(plan->tolerance.parasitic, 0.2);
+  EXPECT_EQ(PlanToJson(*plan), FullPlan());
+}
+
+struct Refused {
+  const char* key;
+  json value;  // Null: the key is removed.
+  std::string message;
+};
+
+std::vector<Refused> RefusedPlans() {
+  return {
+      {"format", nullptr, "/: key 'format' is missing"},
+      {"node", nullptr, "/: key 'node' is missing"},
+      {"cells", nullptr, "/: key 'cells' is missing"},
+      {"fanout",
+       {1, 2},
+       "/: unknown key 'fanout'; known are: cells, corners, drive, fanouts, "
+       "format, node, side_vectors, title, tolerances"},
+      {"format",
+       "gatedyno-plan/9",
+       R"(/format: expected the value "gatedyno-plan/1"; got )"
+       R"("gatedyno-plan/9")"},
+      {"title", 7, "/title: expected string; got 7"},
+      {"node", 45, "/node: expected string, at least 1 long; got 45"},
+      {"node", "", R"(/node: expected string, at least 1 long; got "")"},
+      {"cells",
+       "inv",
+       R"(/cells: expected array, at least 1 of them; got "inv")"},
+      {"cells",
+       json::array(),
+       "/cells: expected array, at least 1 of them; got []"},
+      {"cells",
+       {"inv", 3},
+       "/cells/1: expected string, at least 1 long; got 3"},
+      {"corners",
+       json::array(),
+       "/corners: expected array, at least 1 of them; got []"},
+      {"corners",
+       {true},
+       "/corners/0: expected string, at least 1 long; got true"},
+      {"fanouts",
+       json::array(),
+       "/fanouts: expected array, at least 2 of them, no two alike; got []"},
+      {"fanouts",
+       {0},
+       "/fanouts/0: expected number, more than 0, at most 1000; got 0"},
+      {"fanouts",
+       {4},
+       "/fanouts: expected array, at least 2 of them, no two alike; got [4]"},
+      {"fanouts",
+       {4, 4},
+       "/fanouts: expected array, at least 2 of them, no two alike; got [4,4]"},
+      {"fanouts",
+       {1, -2},
+       "/fanouts/1: expected number, more than 0, at most 1000; got -2"},
+      {"fanouts",
+       {1, 1001},
+       "/fanouts/1: expected number, more than 0, at most 1000; got 1001"},
+      {"fanouts",
+       {1, "4"},
+       R"(/fanouts/1: expected number, more than 0, at most 1000; got "4")"},
+      {"fanouts",
+       "1,2,3",
+       R"(/fanouts: expected array, at least 2 of them, no two alike; got )"
+       R"("1,2,3")"},
+      {"drive",
+       "step",
+       R"(/drive: expected one of ["matched","self"]; got "step")"},
+      {"side_vectors",
+       true,
+       R"(/side_vectors: expected one of ["worst","all"]; got true)"},
+      {"tolerances", 0.1, "/tolerances: expected object; got 0.1"},
+      {"tolerances",
+       {{"effort", 0}},
+       "/tolerances/effort: expected number, more than 0, at most 10; got 0"},
+      {"tolerances",
+       {{"parasitic", "35 %"}},
+       R"(/tolerances/parasitic: expected number, more than 0, at most 10; )"
+       R"(got "35 %")"},
+      {"tolerances",
+       {{"g", 0.1}},
+       "/tolerances: unknown key 'g'; known are: effort, parasitic"},
+  };
+}
+
+TEST_F(PlanTest, SaysWhatIsWrongAndWhere) {
+  for (const Refused& refused : RefusedPlans()) {
+    json plan = SmallPlan();
+    if (refused.value.is_null()) {
+      plan.erase(refused.key);
+    } else {
+      plan[refused.key] = refused.value;
+    }
+    const Result<Plan> loaded = Load(plan);
+    ASSERT_FALSE(loaded.ok()) << refused.message;
+    EXPECT_EQ(loaded.error().kind, ErrorKind::kBadInput);
+    EXPECT_EQ(loaded.error().message, File() + ": " + refused.message);
+  }
+}
+
+TEST_F(PlanTest, APlanIsAnObject) {
+  const Result<Plan> loaded = Load(json::array());
+  ASSERT_FALSE(loaded.ok());
+  EXPECT_EQ(loaded.error().message, File() + ": /: expected object; got []");
+}
+
+struct Fanouts {
+  std::vector<double> given;
+  std::string message;  // Empty: accepted.
+};
+
+TEST(CheckFanoutsTest, RefusesWhatTheSchemaRefuses) {
+  const std::vector<Fanouts> cases = {
+      {{1, 2}, ""},
+      {{0.5, 1000}, ""},
+      {{}, "--fanouts: a line needs two different ones, got 0"},
+      {{0}, "--fanouts: 0: must be above 0 and at most 1000"},
+      {{4}, "--fanouts: a line needs two different ones, got 1"},
+      {{4, 4}, "--fanouts: 4 is there twice"},
+      {{1, 2, 2}, "--fanouts: 2 is there twice"},
+      {{1, -2}, "--fanouts: -2: must be above 0 and at most 1000"},
+      {{1, 1001}, "--fanouts: 1001: must be above 0 and at most 1000"},
+      {{1, std::stod("nan")},
+       "--fanouts: nan: must be above 0 and at most 1000"},
+  };
+  for (const Fanouts& tried : cases) {
+    const Status status = CheckFanouts(tried.given);
+    EXPECT_EQ(status.ok() ? "" : status.error().message, tried.message);
+  }
+}
+
+}  // namespace
+}  // namespace gatedyno

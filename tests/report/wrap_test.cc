@@ -1,0 +1,76 @@
+#include "harness/report/wrap.h"
+
+#include <string>
+
+#include <gtest/gtest.h>
+
+namespace gatedyno {
+namespace {
+
+std::string Times(size_t count, const std::string& text) {
+  std::string all;
+  for (size_t i = 0; i < count; ++i) {
+    all += text;
+  }
+  return all;
+}
+
+struct Case {
+  std::string text;
+  std::string wrapped;
+};
+
+TEST(WrapTest, BreaksAtBlanks) {
+  const std::string ten = "ten chars ";  // Ten of them fill a line.
+  const std::string full = Times(9, ten) + "ten chars.";
+  const Case cases[] = {
+      {"", ""},
+      {"short", "short"},
+      {"two  blanks stay", "two  blanks stay"},
+      {"    indented", "    indented"},
+      {"no blanks at the end  ", "no blanks at the end"},
+      {full, full},
+      {full + " more", full + "\n  more"},
+      {full + "more", Times(9, ten) + "ten\n  chars.more"},
+      {full + "    more", full + "\n  more"},
+      {full + "  ", full},
+      // Nowhere to break.
+      {Times(130, "x"), Times(100, "x") + "\n  " + Times(30, "x")},
+      {"   " + Times(100, "x"),
+       "   " + Times(97, "x") + "\n  " + Times(3, "x")},
+      {Times(300, "x"),
+       Times(100, "x") + "\n  " + Times(98, "x") + "\n  " + Times(98, "x") +
+           "\n  " + Times(4, "x")},
+      // A column a code point.
+      {Times(100, "\xc2\xb1"), Times(100, "\xc2\xb1")},
+      {Times(101, "\xc2\xb1"), Times(100, "\xc2\xb1") + "\n  \xc2\xb1"},
+      // What a terminal would obey.
+      {"a\x1b[2Jb\nc\td\x7f", "a?[2Jb?c?d?"},
+  };
+  for (const Case& tried : cases) {
+    EXPECT_EQ(Wrap(tried.text), tried.wrapped) << tried.text;
+  }
+}
+
+TEST(WrapTest, IndentsAsToldAndNeverExceeds) {
+  const std::string text = Times(60, "word and longer words ");
+  for (const size_t indent : {0U, 2U, 21U, 59U, 99U}) {
+    const std::string wrapped = Wrap(text, indent);
+    size_t begin = 0;
+    while (begin < wrapped.size()) {
+      const size_t end = std::min(wrapped.find('\n', begin), wrapped.size());
+      const std::string line = wrapped.substr(begin, end - begin);
+      EXPECT_LE(ColumnsOf(line), kColumns);
+      EXPECT_TRUE(begin == 0 || line.find_first_not_of(' ') == indent) << line;
+      begin = end + 1;
+    }
+  }
+}
+
+TEST(WrapTest, SurvivesBytesThatAreNoText) {
+  const std::string bytes = Times(150, "\x80") + Times(150, "\xff");
+  EXPECT_FALSE(Wrap(bytes).empty());
+}
+
+}  // namespace
+}  // namespace gatedyno
