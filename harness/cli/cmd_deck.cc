@@ -54,7 +54,7 @@ class DeckFolder {
   Status Write(const ArcSweep& sweep, const std::string& corner) {
     for (size_t i = 0; i < sweep.jobs.size(); ++i) {
       const std::string stem = DeckStem(sweep, sweep.fanouts[i], corner);
-      const Status status =
+      Status status =
           WriteFile(folder_ / names_.FileName(stem, ".sp"), sweep.jobs[i].deck);
       if (!status.ok()) {
         return status;

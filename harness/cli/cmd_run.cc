@@ -52,7 +52,7 @@ std::string JsonText(const nlohmann::json& json, int indent = -1) {
 Status WriteReports(const Options& options, const RunResult& result) {
   if (options.json) {
     constexpr int kIndent = 1;
-    const Status written = WriteFile(
+    Status written = WriteFile(
         *options.json, JsonText(RunResultToJson(result), kIndent) + "\n");
     if (!written.ok()) {
       return written;

@@ -15,7 +15,7 @@ namespace {
 // Before tau is known: no bulk node's is above 0.1 ps per nanometre of drawn
 // length at its nominal corner (180 nm: 12.4 ps, 45 nm: 2.2 ps).  Too large
 // only makes the calibration's own runs longer.
-constexpr double kTauPerLength_s_m = 1e-4;
+constexpr double kTauPerLengthSPerM = 1e-4;
 
 struct InverterSweeps {
   ArcSweep rise;
@@ -31,7 +31,7 @@ InverterSweeps PlanInverter(const Bench& bench,
                    .parasitic_by_nodes = 1.0,
                    .parasitic_by_elmore = 1.0,
                    .fixed_first_effort = {}};
-  test.time_unit_s = kTauPerLength_s_m * bench.node->drawn_length_m;
+  test.time_unit_s = kTauPerLengthSPerM * bench.node->drawn_length_m;
   test.arc = {.cell = inverter.name,
               .pin = inverter.net_name(inverter.pins[0]),
               .output = inverter.net_name(inverter.pins[1]),

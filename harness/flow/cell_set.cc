@@ -87,7 +87,7 @@ Result<std::vector<fs::path>> CellFiles(const std::vector<std::string>& names,
   std::vector<fs::path> files;
   std::set<fs::path> seen;
   for (const std::string& name : names) {
-    const Result<std::vector<fs::path>> found = FilesOf(name, folder);
+    Result<std::vector<fs::path>> found = FilesOf(name, folder);
     if (!found.ok()) {
       return found;
     }

@@ -18,7 +18,7 @@ OutcomeBook::OutcomeBook(SimRunner* runner,
       on_progress_(std::move(on_progress)) {}
 
 Status OutcomeBook::Finish(std::span<const Job> jobs) {
-  const Status noted = store_->AddJobs(run_, jobs);
+  Status noted = store_->AddJobs(run_, jobs);
   if (!noted.ok()) {
     return noted;
   }
@@ -27,12 +27,11 @@ Status OutcomeBook::Finish(std::span<const Job> jobs) {
     return Forward(open);
   }
   Status kept = Ok();
-  const Status ran =
-      runner_->Run(*open, [&](const Job& job, const Outcome& outcome) {
-        const Status now = Keep(job, outcome);
-        kept = kept.ok() ? now : kept;
-        on_progress_(counts_);
-      });
+  Status ran = runner_->Run(*open, [&](const Job& job, const Outcome& outcome) {
+    const Status now = Keep(job, outcome);
+    kept = kept.ok() ? now : kept;
+    on_progress_(counts_);
+  });
   if (!ran.ok()) {
     return ran;
   }

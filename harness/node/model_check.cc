@@ -29,7 +29,7 @@ Status VisitFiles(const fs::path& root,
     if (!text.ok()) {
       return Forward(text);
     }
-    const Status visited = visit(*text);
+    Status visited = visit(*text);
     if (!visited.ok()) {
       return visited;
     }
@@ -131,14 +131,14 @@ Status CheckModels(const ProcessNode& node) {
   std::set<fs::path> checked;
   for (const Process& process : node.processes) {
     for (const ModelFile& model : process.models) {
-      const Status path = CheckPath(model);
+      Status path = CheckPath(model);
       if (!path.ok()) {
         return path;
       }
       if (!checked.insert(model.path).second) {
         continue;
       }
-      const Status status = VisitFiles(model.path, [&](const ModelText& text) {
+      Status status = VisitFiles(model.path, [&](const ModelText& text) {
         return node.trusted_models ? Ok() : CheckText(model.path, text);
       });
       if (!status.ok()) {

@@ -161,8 +161,7 @@ std::string WhyIncludeRefused(std::string_view statement) {
 
 std::string WhyLineRefused(std::string_view text, bool continues) {
   const bool comment = IsComment(text);
-  if (const std::string why = WhyCharactersRefused(text, comment);
-      !why.empty()) {
+  if (std::string why = WhyCharactersRefused(text, comment); !why.empty()) {
     return why;
   }
   if (comment) {

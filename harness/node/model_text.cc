@@ -34,7 +34,7 @@ std::string TakeWord(std::string_view& text) {
     text.remove_prefix(1);
   }
   const size_t end = quoted ? text.find(quote) : text.find_first_of(kBlank);
-  const std::string word(text.substr(0, end));
+  std::string word(text.substr(0, end));
   text = end == std::string_view::npos ? std::string_view()
                                        : text.substr(end + (quoted ? 1 : 0));
   return word;

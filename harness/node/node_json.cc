@@ -120,10 +120,12 @@ Status CheckProcesses(const ProcessNode& node) {
 Status CheckDevices(const ProcessNode& node) {
   for (const auto& [polarity, letter] :
        {std::pair{Polarity::kN, 'n'}, std::pair{Polarity::kP, 'p'}}) {
-    const bool found = std::any_of(
-        node.devices.begin(), node.devices.end(), [&](const NodeDevice& d) {
-          return d.polarity == polarity;
-        });
+    // A structured binding cannot be captured by name in C++20's Clang 14.
+    const bool found = std::any_of(node.devices.begin(),
+                                   node.devices.end(),
+                                   [wanted = polarity](const NodeDevice& d) {
+                                     return d.polarity == wanted;
+                                   });
     if (!found) {
       return BadInput(fmt::format("{}: /devices: none has polarity \"{}\"",
                                   node.file.string(),

@@ -108,6 +108,7 @@ constexpr std::array kColumns = {
 std::string CsvReport(const RunResult& result) {
   constexpr const char* kLineEnd = "\r\n";
   std::vector<std::string> fields;
+  fields.reserve(kColumns.size());
   for (const Column& column : kColumns) {
     fields.emplace_back(column.name);
   }
