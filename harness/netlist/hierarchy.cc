@@ -32,7 +32,7 @@ class Walker {
     path_.push_back(&subckt);
     for (const CellLine& line : subckt.lines) {
       if (const auto* instance = std::get_if<InstanceLine>(&line)) {
-        const Parsed<int> below = HeightOf(*instance);
+        Parsed<int> below = HeightOf(*instance);
         if (!below.ok()) {
           return below;
         }
@@ -64,7 +64,7 @@ class Walker {
           fmt::format("subcircuit {} contains itself", Quote(instance.subckt)));
     }
     const bool too_long = path_.size() > kDeepestNesting;
-    const Parsed<int> below = too_long ? kDeepestNesting : Height(*called);
+    Parsed<int> below = too_long ? kDeepestNesting : Height(*called);
     if (below.ok() && *below >= kDeepestNesting) {
       return Complain(
           instance.subckt_position,

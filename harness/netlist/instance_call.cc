@@ -44,7 +44,7 @@ ParseStatus PassParameters(const InstanceLine& line,
                            Frame& called) {
   for (const ParameterDefinition& given : line.overrides) {
     if (given.name == kMultiplicity) {
-      const ParseStatus passed = PassMultiplicity(given.value, caller, called);
+      ParseStatus passed = PassMultiplicity(given.value, caller, called);
       if (!passed.ok()) {
         return passed;
       }

@@ -40,7 +40,7 @@ ParseStatus CheckParameters(const Fields& fields, std::string_view own) {
 }
 
 ParseStatus CheckWords(const Fields& fields) {
-  if (const ParseStatus refused = RefuseParamsKeyword(fields); !refused.ok()) {
+  if (ParseStatus refused = RefuseParamsKeyword(fields); !refused.ok()) {
     return refused;
   }
   if (fields.words.size() < kWordsBeforeValue) {

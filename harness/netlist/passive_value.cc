@@ -10,14 +10,14 @@ Parsed<double> EvaluatePassive(const PassiveLine& line,
                                double copies,
                                ParameterSource& parameters) {
   if (line.multiplicity) {
-    const Parsed<double> own =
+    Parsed<double> own =
         EvaluatePositive(*line.multiplicity, "a multiplicity", parameters);
     if (!own.ok()) {
       return own;
     }
     copies *= *own;
   }
-  const Parsed<double> one = Evaluate(line.value.expression, parameters);
+  Parsed<double> one = Evaluate(line.value.expression, parameters);
   if (!one.ok()) {
     return one;
   }

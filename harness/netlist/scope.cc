@@ -1,6 +1,7 @@
 #include "harness/netlist/scope.h"
 
 #include <cstddef>
+#include <set>
 
 #include <fmt/format.h>
 #include <fmt/ranges.h>
@@ -84,17 +85,13 @@ ParseStatus Scope::CheckAll() {
 }
 
 std::vector<std::string> Scope::Names() const {
-  std::map<std::string, bool> seen;
+  std::set<std::string> names;
   for (const Scope* scope = this; scope != nullptr; scope = scope->enclosing_) {
     for (const auto& [name, entry] : scope->entries_) {
-      seen.emplace(name, true);
+      names.insert(name);
     }
   }
-  std::vector<std::string> names;
-  for (const auto& [name, is_seen] : seen) {
-    names.push_back(name);
-  }
-  return names;
+  return {names.begin(), names.end()};
 }
 
 }  // namespace gatedyno

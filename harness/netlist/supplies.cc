@@ -131,8 +131,7 @@ ParseStatus RecogniseSupplies(const Subckt& top,
   }
   cell.power = *power;
   cell.ground = *ground;
-  if (const ParseStatus taken = TakeGlobalGround(top, options, cell);
-      !taken.ok()) {
+  if (ParseStatus taken = TakeGlobalGround(top, options, cell); !taken.ok()) {
     return taken;
   }
   if (cell.power < 0) {

@@ -61,7 +61,7 @@ bool HasTransientPlot() {
 // The library's signature.
 // NOLINTNEXTLINE(readability-non-const-parameter)
 int Session::OnLine(char* line, int /*id*/, void* self) {
-  static_cast<Session*>(self)->transcript_.Add(line);
+  static_cast<Session*>(self)->printout_.Add(line);
   return 0;
 }
 
@@ -88,9 +88,9 @@ Result<std::unique_ptr<Session>> Session::Start() {
       OnLine, nullptr, OnExit, nullptr, nullptr, nullptr, session.get());
   // Its two threads cost twice the processor time on small circuits.
   session->Command("set num_threads=1");
-  session->transcript_.Clear();
+  session->printout_.Clear();
   session->Command("version -s");
-  const std::vector<std::string>& said = session->transcript_.lines();
+  const std::vector<std::string>& said = session->printout_.lines();
   const std::string version = After(said, "ngspice-");
   if (version.empty()) {
     return Unavailable("the simulator does not say its version");
@@ -142,7 +142,7 @@ Status Session::Simulate(const std::string& deck) {
   // reading vectors would return the last job's numbers.
   Command("destroy all");
   Command("remcirc");
-  transcript_.Clear();
+  printout_.Clear();
   std::vector<std::string> lines = SplitLines(deck);
   std::vector<char*> pointers;
   pointers.reserve(lines.size() + 1);
@@ -151,11 +151,11 @@ Status Session::Simulate(const std::string& deck) {
   }
   pointers.push_back(nullptr);
   ngSpice_Circ(pointers.data());
-  if (usable_ && !transcript_.complained()) {
+  if (usable_ && !printout_.complained()) {
     Command("run");
   }
-  if (transcript_.complained()) {
-    return BadInput(transcript_.Complaint());
+  if (printout_.complained()) {
+    return BadInput(printout_.Complaint());
   }
   if (!usable_) {
     return BadInput("the deck makes the simulator quit");

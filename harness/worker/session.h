@@ -12,7 +12,7 @@
 #include <vector>
 
 #include "harness/base/result.h"
-#include "harness/worker/transcript.h"
+#include "harness/worker/printout.h"
 #include "harness/worker/waveform.h"
 
 namespace gatedyno {
@@ -61,7 +61,7 @@ class Session {
                                            const std::set<std::string>& nets,
                                            double stop_s);
 
-  Transcript transcript_;
+  Printout printout_;
   std::string simulator_;
   bool usable_ = true;
   double last_run_s_ = 0.0;

@@ -7,6 +7,7 @@
 #include <gtest/gtest.h>
 
 #include "harness/fit/line_fit.h"
+#include "tests/fit/on_line.h"
 
 namespace gatedyno {
 namespace {
@@ -14,18 +15,6 @@ namespace {
 constexpr double kRounding = 1e-12;
 Corner Typical() {
   return {"typical", "tt", 1.0, 25.0};
-}
-
-std::vector<Point> OnLine(const std::vector<double>& fanouts,
-                          double slope_s,
-                          double intercept_s) {
-  std::vector<Point> points;
-  points.reserve(fanouts.size());
-  for (const double fanout : fanouts) {
-    points.push_back(
-        {.fanout = fanout, .delay_s = slope_s * fanout + intercept_s});
-  }
-  return points;
 }
 
 TEST(CalibrateTest, TakesTheMeanOfBothEdges) {

@@ -11,24 +11,13 @@
 #include <gtest/gtest.h>
 
 #include "harness/fit/coverage.h"
+#include "tests/fit/on_line.h"
 
 namespace gatedyno {
 namespace {
 
 // Two ways of computing the same sums differ by rounding only.
 constexpr double kRounding = 1e-12;
-
-std::vector<Point> OnLine(const std::vector<double>& fanouts,
-                          double slope_s,
-                          double intercept_s) {
-  std::vector<Point> points;
-  points.reserve(fanouts.size());
-  for (const double fanout : fanouts) {
-    points.push_back(
-        {.fanout = fanout, .delay_s = slope_s * fanout + intercept_s});
-  }
-  return points;
-}
 
 // NIST Statistical Reference Datasets, linear regression, "Norris" (x, y).
 // Typed from memory; that the certified values come out proves the copy.

@@ -91,7 +91,7 @@ constexpr BuiltInCell kCells[] = {
     {"sum3_rep", "a b c con y", 14, "15 15 15 6", 15},
 };
 
-constexpr double kUnit_m = 90e-9;
+constexpr double kUnitWidthM = 90e-9;
 // Widths are sums of a few products: rounding only.
 constexpr double kTolerance = 1e-9;
 
@@ -101,7 +101,7 @@ std::filesystem::path CellsFolder() {
 
 Cell ReadBuiltIn(const std::string& name) {
   ReaderOptions options = TestOptions();
-  options.parameters = {{"wunit", kUnit_m}, {"lgate", 45e-9}};
+  options.parameters = {{"wunit", kUnitWidthM}, {"lgate", 45e-9}};
   Result<std::vector<Cell>> cells =
       ReadCellFile(CellsFolder() / (name + ".sp"), options);
   if (!cells.ok() || cells->size() != 1) {
@@ -122,7 +122,7 @@ std::string PinNames(const Cell& cell) {
 double GateUnits(const Cell& cell, NetId net) {
   double units = 0.0;
   for (const Mosfet& mosfet : cell.mosfets) {
-    units += mosfet.gate == net ? mosfet.total_width_m() / kUnit_m : 0.0;
+    units += mosfet.gate == net ? mosfet.total_width_m() / kUnitWidthM : 0.0;
   }
   return units;
 }
@@ -130,7 +130,7 @@ double GateUnits(const Cell& cell, NetId net) {
 double DrainUnits(const Cell& cell, NetId net) {
   double units = 0.0;
   for (const Mosfet& mosfet : cell.mosfets) {
-    units += mosfet.drain == net ? mosfet.total_width_m() / kUnit_m : 0.0;
+    units += mosfet.drain == net ? mosfet.total_width_m() / kUnitWidthM : 0.0;
   }
   return units;
 }
@@ -195,7 +195,7 @@ TEST(BuiltInCells, UseTheNodesParameters) {
       const bool is_n = mosfet.polarity == Polarity::kN;
       EXPECT_EQ(mosfet.body, is_n ? cell.ground : cell.power) << mosfet.name;
       EXPECT_EQ(mosfet.length_m, 45e-9) << mosfet.name;
-      EXPECT_GE(mosfet.width_m, kUnit_m * (1 - kTolerance)) << mosfet.name;
+      EXPECT_GE(mosfet.width_m, kUnitWidthM * (1 - kTolerance)) << mosfet.name;
     }
   }
 }

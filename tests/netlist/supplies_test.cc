@@ -17,6 +17,7 @@ using testing::IsEmpty;
 std::vector<std::string> NamesOf(const Cell& cell,
                                  const std::vector<NetId>& nets) {
   std::vector<std::string> names;
+  names.reserve(nets.size());
   for (const NetId net : nets) {
     names.push_back(cell.net_name(net));
   }

@@ -4,8 +4,8 @@
 // include, unknown subcircuit, refused parameter), so its words are the first
 // of three judges; the plot and its last time point are the others.
 
-#ifndef GATEDYNO_WORKER_TRANSCRIPT_H_
-#define GATEDYNO_WORKER_TRANSCRIPT_H_
+#ifndef GATEDYNO_WORKER_PRINTOUT_H_
+#define GATEDYNO_WORKER_PRINTOUT_H_
 
 #include <string>
 #include <string_view>
@@ -13,7 +13,7 @@
 
 namespace gatedyno {
 
-class Transcript {
+class Printout {
  public:
   // `line` as the simulator sends it: "stderr Error: ...", "stdout ...".
   // Only what goes to its standard error can be a complaint.
@@ -38,4 +38,4 @@ inline constexpr size_t kMaxComplaintBytes = 600;
 
 }  // namespace gatedyno
 
-#endif  // GATEDYNO_WORKER_TRANSCRIPT_H_
+#endif  // GATEDYNO_WORKER_PRINTOUT_H_

@@ -1,4 +1,4 @@
-#include "harness/worker/transcript.h"
+#include "harness/worker/printout.h"
 
 #include <string>
 #include <vector>
@@ -8,13 +8,13 @@
 namespace gatedyno {
 namespace {
 
-struct TranscriptRow {
+struct PrintoutRow {
   std::vector<std::string> lines;  // As ngspice 39.3 sent them.
   std::string complaint;
 };
 
-TEST(TranscriptTest, HearsComplaintsAndNothingElse) {
-  const TranscriptRow rows[] = {
+TEST(PrintoutTest, HearsComplaintsAndNothingElse) {
+  const PrintoutRow rows[] = {
       {{}, ""},
       // A good run, and remarks that are none of our business.
       {{"stdout Circuit: error in the title is none",
@@ -42,32 +42,32 @@ TEST(TranscriptTest, HearsComplaintsAndNothingElse) {
       {{"stderr Error: there aren't any circuits loaded."},
        "Error: there aren't any circuits loaded."},
   };
-  for (const TranscriptRow& row : rows) {
-    Transcript transcript;
+  for (const PrintoutRow& row : rows) {
+    Printout printout;
     for (const std::string& line : row.lines) {
-      transcript.Add(line);
+      printout.Add(line);
     }
-    EXPECT_EQ(transcript.complained(), !row.complaint.empty());
-    EXPECT_EQ(transcript.Complaint(), row.complaint);
+    EXPECT_EQ(printout.complained(), !row.complaint.empty());
+    EXPECT_EQ(printout.Complaint(), row.complaint);
   }
 }
 
-TEST(TranscriptTest, CutsALongComplaint) {
-  Transcript transcript;
+TEST(PrintoutTest, CutsALongComplaint) {
+  Printout printout;
   for (int i = 0; i < 1000; ++i) {
-    transcript.Add("stderr Error: no such thing");
+    printout.Add("stderr Error: no such thing");
   }
-  const std::string complaint = transcript.Complaint();
+  const std::string complaint = printout.Complaint();
   EXPECT_EQ(complaint.size(), kMaxComplaintBytes + 3);
   EXPECT_TRUE(complaint.ends_with("..."));
 }
 
-TEST(TranscriptTest, ForgetsTheCircuitBefore) {
-  Transcript transcript;
-  transcript.Add("stderr Error: unknown subckt: x1 a b");
-  transcript.Clear();
-  EXPECT_FALSE(transcript.complained());
-  EXPECT_TRUE(transcript.lines().empty());
+TEST(PrintoutTest, ForgetsTheCircuitBefore) {
+  Printout printout;
+  printout.Add("stderr Error: unknown subckt: x1 a b");
+  printout.Clear();
+  EXPECT_FALSE(printout.complained());
+  EXPECT_TRUE(printout.lines().empty());
 }
 
 }  // namespace

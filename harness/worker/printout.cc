@@ -1,4 +1,4 @@
-#include "harness/worker/transcript.h"
+#include "harness/worker/printout.h"
 
 #include <algorithm>
 #include <array>
@@ -64,7 +64,7 @@ bool IsEcho(std::string_view text) {
 
 }  // namespace
 
-void Transcript::Add(std::string_view line) {
+void Printout::Add(std::string_view line) {
   const bool is_error = line.starts_with(kErrorStream);
   if (is_error || line.starts_with(kOutputStream)) {
     line.remove_prefix(kErrorStream.size());
@@ -77,12 +77,12 @@ void Transcript::Add(std::string_view line) {
   }
 }
 
-void Transcript::Clear() {
+void Printout::Clear() {
   lines_.clear();
   complaints_.clear();
 }
 
-std::string Transcript::Complaint() const {
+std::string Printout::Complaint() const {
   const bool only_echoes = std::all_of(
       complaints_.begin(), complaints_.end(), [](const std::string& line) {
         return IsEcho(line);
