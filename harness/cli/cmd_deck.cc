@@ -2,19 +2,16 @@
 // the models.
 
 #include <filesystem>
-#include <map>
 #include <memory>
 
 #include <fmt/format.h>
 
 #include "harness/base/file.h"
-#include "harness/base/install.h"
 #include "harness/cli/commands.h"
 #include "harness/cli/file_names.h"
 #include "harness/cli/plan_options.h"
 #include "harness/flow/calibrate.h"
 #include "harness/flow/characterize.h"
-#include "harness/sim/simulator_identity.h"
 #include "harness/sim/worker_pool.h"
 #include "harness/store/store.h"
 
@@ -27,10 +24,8 @@ struct Options {
 };
 
 // "nand2_a_y_rise_1_h4_typical": arc, side vector, fanout, corner.
-std::string DeckStem(const ArcSweep& sweep,
-                     double fanout,
-                     const std::string& corner) {
-  const Arc& arc = sweep.arc;
+std::string DeckStem(const StageTest& test, const std::string& corner) {
+  const Arc& arc = test.arc;
   std::string side;
   for (const SideInput& input : arc.side) {
     side += input.high ? '1' : '0';
@@ -41,7 +36,7 @@ std::string DeckStem(const ArcSweep& sweep,
                      arc.output,
                      EdgeName(arc.edge),
                      side.empty() ? "" : "_" + side,
-                     fanout,
+                     test.fanout,
                      corner);
 }
 
@@ -51,55 +46,64 @@ class DeckFolder {
   explicit DeckFolder(std::filesystem::path folder)
       : folder_(std::move(folder)) {}
 
-  Status Write(const ArcSweep& sweep, const std::string& corner) {
-    for (size_t i = 0; i < sweep.jobs.size(); ++i) {
-      const std::string stem = DeckStem(sweep, sweep.fanouts[i], corner);
-      Status status =
-          WriteFile(folder_ / names_.FileName(stem, ".sp"), sweep.jobs[i].deck);
-      if (!status.ok()) {
-        return status;
-      }
-    }
-    written_ += sweep.jobs.size();
-    return Ok();
+  Status Write(const Bench& bench, const StageTest& test) {
+    const std::string stem = DeckStem(test, bench.corner.name);
+    ++written_;
+    return WriteFile(folder_ / names_.FileName(stem, ".sp"),
+                     DeckText(StageJob(bench, test), 0));
   }
 
-  size_t written() const { return written_; }
+  int written() const { return written_; }
 
  private:
   std::filesystem::path folder_;
   FileNames names_;
-  size_t written_ = 0;
+  int written_ = 0;
 };
 
-// The run time of a deck follows from tau, so the reference inverter is
-// measured first.
-Result<ExitCode> WriteDecks(const PreparedRun& run,
-                            const std::string& simulator,
-                            OutcomeBook* book,
-                            DeckFolder* folder) {
-  const Result<CalibrationSet> calibrated =
-      CalibrateCorners(run, simulator, book);
-  if (!calibrated.ok()) {
-    return Forward(calibrated);
-  }
-  for (const auto& [corner, reason] : calibrated->failures) {
-    return Unavailable(fmt::format("corner {}: {}", corner, reason));
-  }
-  for (const auto& [name, calibration] : calibrated->by_corner) {
-    const Result<std::vector<ArcSweep>> sweeps =
-        PlanArcs(run, calibration.corner, calibration, simulator);
-    if (!sweeps.ok()) {
-      return Forward(sweeps);
-    }
-    for (const ArcSweep& sweep : *sweeps) {
-      const Status written = folder->Write(sweep, name);
-      if (!written.ok()) {
-        return Forward(written);
+Status WriteCorner(const PreparedRun& run,
+                   const Bench& bench,
+                   const Calibration& calibration,
+                   DeckFolder* folder) {
+  for (size_t cell = 0; cell < run.cells.size(); ++cell) {
+    for (StageTest& test : ArcTests(run, cell, calibration)) {
+      for (const double fanout : AllFanouts(FanoutRuleOf(run.plan))) {
+        test.fanout = fanout;
+        Status written = folder->Write(bench, test);
+        if (!written.ok()) {
+          return written;
+        }
       }
     }
   }
-  return kAllWithin;
+  return Ok();
+}
+
+// The run time of a deck follows from tau, so the reference inverter is
+// measured first.
+Status WriteDecks(const PreparedRun& run,
+                  const Benches& benches,
+                  WorkDesk* desk,
+                  DeckFolder* folder) {
+  const FanoutRule fanouts = FanoutRuleOf(run.plan);
+  AccuracySample sample(run.plan.accuracy);
+  const auto references = MeasureReferences(
+      run, benches, {.fanouts = &fanouts, .sample = &sample, .desk = desk});
+  if (!references.ok()) {
+    return Forward(references);
+  }
+  const CalibrationSet calibrated =
+      CalibrateCorners(run, *references, sample.DelayUncertainty());
+  for (const auto& [corner, reason] : calibrated.failures) {
+    return Unavailable(fmt::format("corner {}: {}", corner, reason));
+  }
+  for (const auto& [name, calibration] : calibrated.by_corner) {
+    Status written = WriteCorner(run, benches.at(name), calibration, folder);
+    if (!written.ok()) {
+      return written;
+    }
+  }
+  return Ok();
 }
 
 Result<ExitCode> Deck(const Options& options) {
@@ -111,7 +115,11 @@ Result<ExitCode> Deck(const Options& options) {
   if (!run.ok()) {
     return Forward(run);
   }
-  const Result<std::string> simulator = SimulatorIdentity(WorkerProgram());
+  Result<WorkerPool> pool = WorkerPool::Make({});
+  if (!pool.ok()) {
+    return Forward(pool);
+  }
+  const Result<std::string> simulator = pool->Simulator();
   if (!simulator.ok()) {
     return Forward(simulator);
   }
@@ -119,22 +127,18 @@ Result<ExitCode> Deck(const Options& options) {
   if (!store.ok()) {
     return Forward(store);
   }
-  Result<WorkerPool> pool = WorkerPool::Make({});
-  if (!pool.ok()) {
-    return Forward(pool);
+  const Result<Benches> benches = BenchesOf(*run, *simulator);
+  if (!benches.ok()) {
+    return Forward(benches);
   }
-  const Result<RunId> run_id = store->BeginRun({});
-  if (!run_id.ok()) {
-    return Forward(run_id);
-  }
-  OutcomeBook book(
-      &*pool, &*store, *run_id, [](const JobCounts& /*counts*/) {});
+  WorkDesk desk(&*pool, &*store, {});
   DeckFolder folder(options.folder);
-  Result<ExitCode> done = WriteDecks(*run, *simulator, &book, &folder);
-  if (done.ok()) {
-    fmt::print("{} decks in {}\n", folder.written(), options.folder);
+  const Status written = WriteDecks(*run, *benches, &desk, &folder);
+  if (!written.ok()) {
+    return Forward(written);
   }
-  return done;
+  fmt::print("{} decks in {}\n", folder.written(), options.folder);
+  return kAllWithin;
 }
 
 }  // namespace

@@ -2,58 +2,43 @@
 // numbers.
 
 #include <algorithm>
-#include <ctime>
-#include <filesystem>
 #include <memory>
-#include <optional>
 
-#include <fmt/chrono.h>
 #include <fmt/format.h>
 #include <unistd.h>
 
 #include "harness/base/file.h"
-#include "harness/base/install.h"
 #include "harness/cli/commands.h"
+#include "harness/cli/farm_options.h"
+#include "harness/cli/interrupt.h"
 #include "harness/cli/plan_options.h"
-#include "harness/cli/progress_line.h"
+#include "harness/cli/run_options.h"
+#include "harness/cli/run_session.h"
 #include "harness/compare/summary.h"
-#include "harness/flow/characterize.h"
+#include "harness/farm/slurm_farm.h"
 #include "harness/record/run_result_json.h"
 #include "harness/report/csv_report.h"
 #include "harness/report/run_table.h"
 #include "harness/report/wrap.h"
-#include "harness/sim/simulator_identity.h"
 #include "harness/sim/worker_pool.h"
-#include "harness/store/store.h"
 
 namespace gatedyno {
 namespace {
 
-constexpr int kMostWorkers = 1024;
-
 struct Options {
   PlanOptions plan;
-  std::string store = "gatedyno.db";
-  std::optional<std::string> json;
-  std::optional<std::string> csv;
-  int workers = 0;
+  RunOptions run;
+  FarmCliOptions farm;
 };
 
-std::string NowUtc() {
-  return fmt::format("{:%Y-%m-%dT%H:%M:%SZ}", fmt::gmtime(std::time(nullptr)));
-}
-
-// File names and a simulator's words may be no UTF-8; that must not lose a run.
-std::string JsonText(const nlohmann::json& json, int indent = -1) {
-  return json.dump(
-      indent, ' ', false, nlohmann::json::error_handler_t::replace);
-}
-
-Status WriteReports(const Options& options, const RunResult& result) {
+Status WriteReports(const RunOptions& options, const RunResult& result) {
   if (options.json) {
     constexpr int kIndent = 1;
     Status written = WriteFile(
-        *options.json, JsonText(RunResultToJson(result), kIndent) + "\n");
+        *options.json,
+        RunResultToJson(result).dump(
+            kIndent, ' ', false, nlohmann::json::error_handler_t::replace) +
+            "\n");
     if (!written.ok()) {
       return written;
     }
@@ -73,69 +58,15 @@ ExitCode Judge(const RunResult& result) {
   return summary.beyond + summary.not_measured > 0 ? kSomeBeyond : kAllWithin;
 }
 
-std::string ProgramVersion() {
-  return fmt::format("gatedyno {}", GATEDYNO_VERSION);
-}
-
-// Simulates what the store does not have yet.
-Result<RunResult> Measure(const PreparedRun& prepared,
-                          const RunInfo& info,
-                          WorkerPool* pool,
-                          Store* store) {
-  const std::string started = NowUtc();
-  const Result<RunId> id = store->BeginRun(info);
-  if (!id.ok()) {
-    return Forward(id);
-  }
-  ProgressLine progress;
-  OutcomeBook book(pool, store, *id, [&](const JobCounts& counts) {
-    progress.Show(counts);
-  });
-  Result<RunResult> result =
-      Characterize(prepared, info.simulator_version, &book);
-  if (!result.ok()) {
-    return result;
-  }
-  result->facts.program = ProgramVersion();
-  result->facts.started = started;
-  const Status finished =
-      store->FinishRun(*id, JsonText(RunResultToJson(*result)));
-  return finished.ok() ? std::move(result) : Forward(finished);
-}
-
-Result<RunResult> OpenAndMeasure(const Options& options,
-                                 const PreparedRun& prepared) {
-  const Result<std::string> simulator = SimulatorIdentity(WorkerProgram());
-  if (!simulator.ok()) {
-    return Forward(simulator);
-  }
-  PoolOptions pool_options;
-  pool_options.workers = options.workers;
-  Result<WorkerPool> pool = WorkerPool::Make(std::move(pool_options));
-  if (!pool.ok()) {
-    return Forward(pool);
-  }
-  Result<Store> store = Store::Open(options.store);
-  if (!store.ok()) {
-    return Forward(store);
-  }
-  return Measure(prepared,
-                 {.plan = JsonText(PlanToJson(prepared.plan)),
-                  .node = prepared.node.name,
-                  .program_version = ProgramVersion(),
-                  .simulator_version = *simulator},
-                 &*pool,
-                 &*store);
-}
-
 void PrintJobs(const RunResult& result, const std::string& store) {
   for (const FailedJob& job : result.failed_jobs) {
-    fmt::print(
-        "{}\n",
-        Wrap(fmt::format("failed: {}: {} (deck kept in the store under {})",
-                         job.label,
-                         job.message,
-                         job.key)));
+    fmt::print("{}\n",
+               Wrap(fmt::format("failed: {}: {} (again: gatedyno replay {} "
+                                "--store {})",
+                                job.label,
+                                job.message,
+                                job.key,
+                                store)));
   }
   fmt::print("{} jobs: {} simulated, {} taken from {}, {} failed\n",
              result.jobs.wanted,
@@ -145,22 +76,67 @@ void PrintJobs(const RunResult& result, const std::string& store) {
              result.jobs.failed);
 }
 
+Result<RunResult> MeasureOnFarm(const Options& options,
+                                const PreparedRun& prepared,
+                                const std::string& simulator) {
+  Result<FarmOptions> farm_options =
+      FarmOptionsOf(options.farm, options.run.workers);
+  if (!farm_options.ok()) {
+    return Forward(farm_options);
+  }
+  farm_options->simulator = simulator;
+  farm_options->memory_limit_bytes = options.run.worker_memory_bytes;
+  farm_options->should_stop = &Interrupted;
+  Result<SlurmFarm> farm = SlurmFarm::Make(*std::move(farm_options));
+  if (!farm.ok()) {
+    return Forward(farm);
+  }
+  return RunInSession(prepared, options.run, simulator, &*farm);
+}
+
+Result<RunResult> Measure(const Options& options, const PreparedRun& prepared) {
+  Result<WorkerPool> pool = WorkerPool::Make(PoolOptionsOf(options.run));
+  if (!pool.ok()) {
+    return Forward(pool);
+  }
+  const Result<std::string> simulator = pool->Simulator();
+  if (!simulator.ok()) {
+    return Forward(simulator);
+  }
+  return options.farm.farm
+             ? MeasureOnFarm(options, prepared, *simulator)
+             : RunInSession(prepared, options.run, *simulator, &*pool);
+}
+
 Result<ExitCode> Run(const Options& options) {
-  const Result<Plan> plan = PlanOf(options.plan);
+  if (const Status farm =
+          options.farm.farm ? Ok() : CheckNoFarmOptions(options.farm);
+      !farm.ok()) {
+    return Forward(farm);
+  }
+  Result<Plan> plan = PlanOf(options.plan);
   if (!plan.ok()) {
     return Forward(plan);
   }
+  plan->time_limit_s = options.run.time_limit_s;
   const Result<PreparedRun> prepared = PrepareRun(*plan);
   if (!prepared.ok()) {
     return Forward(prepared);
   }
-  const Result<RunResult> result = OpenAndMeasure(options, *prepared);
+  const Result<RunResult> result = Measure(options, *prepared);
+  if (!result.ok() && Interrupted()) {
+    fmt::print(stderr,
+               "gatedyno: stopped; what was measured is in {}, and the same "
+               "command goes on\n",
+               options.run.store);
+    return kStopped;
+  }
   if (!result.ok()) {
     return Forward(result);
   }
   fmt::print("{}", RunTable(*result, Style(TakesColour(STDOUT_FILENO))));
-  PrintJobs(*result, options.store);
-  const Status written = WriteReports(options, *result);
+  PrintJobs(*result, options.run.store);
+  const Status written = WriteReports(options.run, *result);
   if (!written.ok()) {
     return Forward(written);
   }
@@ -175,16 +151,8 @@ Command RunCommand() {
           [](CLI::App& app) -> Action {
             const auto options = std::make_shared<Options>();
             AddPlanOptions(app, options->plan);
-            app.add_option("--store",
-                           options->store,
-                           "file that keeps every outcome (default: "
-                           "gatedyno.db)");
-            app.add_option("--json", options->json, "write the run as JSON");
-            app.add_option("--csv", options->csv, "write the run as CSV");
-            app.add_option("--workers",
-                           options->workers,
-                           "simulator processes (default: one a processor)")
-                ->check(CLI::Range(1, kMostWorkers));
+            AddRunOptions(app, options->run);
+            AddFarmOptions(app, options->farm);
             return [options] { return Run(*options); };
           }};
 }

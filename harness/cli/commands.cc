@@ -3,7 +3,13 @@
 namespace gatedyno {
 
 std::vector<Command> Commands() {
-  return {EstimateCommand(), RunCommand(), DeckCommand()};
+  return {EstimateCommand(),
+          RunCommand(),
+          DeckCommand(),
+          StatusCommand(),
+          ReportCommand(),
+          ReplayCommand(),
+          TaskCommand()};
 }
 
 }  // namespace gatedyno

@@ -22,6 +22,7 @@ struct Command {
   std::string summary;
   // Adds the command's options and says what to do once they are parsed.
   std::function<Action(CLI::App& app)> add;
+  bool hidden = false;  // Works, but is not in the list: programs call it.
 };
 
 std::vector<Command> Commands();
@@ -29,6 +30,10 @@ std::vector<Command> Commands();
 Command EstimateCommand();  // cmd_estimate.cc
 Command DeckCommand();      // cmd_deck.cc
 Command RunCommand();       // cmd_run.cc
+Command StatusCommand();    // cmd_status.cc
+Command ReplayCommand();    // cmd_replay.cc
+Command ReportCommand();    // cmd_report.cc
+Command TaskCommand();      // cmd_task.cc
 
 }  // namespace gatedyno
 

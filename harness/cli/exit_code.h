@@ -14,6 +14,10 @@ enum ExitCode : int {
   kBadUsage = 2,        // An option, netlist, node or plan is wrong.
   kNotAllMeasured = 3,  // Jobs that could not be measured.
   kOwnFault = 4,        // Ours, or the system's.
+  kStopped = 5,         // By Ctrl-C; the same command goes on.
+  // A farm's task that was told to stop: what is done is published, the rest is
+  // to be run again (sysexits.h: EX_TEMPFAIL).
+  kStoppedEarly = 75,
 };
 
 inline ExitCode ExitCodeOf(const Error& error) {

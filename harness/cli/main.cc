@@ -12,10 +12,9 @@
 #include <CLI/CLI.hpp>
 #include <fmt/format.h>
 
-#include "harness/base/install.h"
 #include "harness/base/text.h"
 #include "harness/cli/commands.h"
-#include "harness/sim/simulator_identity.h"
+#include "harness/sim/worker_pool.h"
 
 namespace gatedyno {
 namespace {
@@ -45,7 +44,11 @@ std::string UsageMessage(const CLI::ParseError& wrong) {
 }
 
 int PrintVersion() {
-  const Result<std::string> simulator = SimulatorIdentity(WorkerProgram());
+  PoolOptions options;
+  options.workers = 1;
+  Result<WorkerPool> pool = WorkerPool::Make(std::move(options));
+  const Result<std::string> simulator =
+      pool.ok() ? pool->Simulator() : Forward(pool);
   if (!simulator.ok()) {
     return Complain(simulator.error());
   }
@@ -77,10 +80,14 @@ int Main(int argc, char** argv) {
   app.add_flag("--version", version, "versions of the program and simulator");
   app.footer(
       "Exit codes: 0 all within, 1 some beyond, 2 bad input, 3 jobs "
-      "that could not be measured,\n4 a fault of ours or the system's.");
+      "that could not be measured,\n4 a fault of ours or the system's, 5 "
+      "stopped by Ctrl-C.");
   std::vector<Entry> entries;
   for (const Command& command : Commands()) {
     CLI::App* sub = app.add_subcommand(command.name, command.summary);
+    if (command.hidden) {
+      sub->group("");
+    }
     entries.push_back({sub, command.add(*sub)});
   }
   app.require_subcommand(0, 1);

@@ -52,8 +52,14 @@ void AddPlanOptions(CLI::App& app, PlanOptions& options) {
                  "corner of the node by name (* and ? allowed), repeatable "
                  "(default: its first)")
       ->allow_extra_args(false);
-  app.add_option("--fanouts", options.fanouts, "for example 1,2,3,4,6")
+  app.add_option("--fanouts",
+                 options.fanouts,
+                 "for example 1,2,3,4,6 (default: as few as each arc needs)")
       ->delimiter(',');
+  app.add_option("--accuracy",
+                 options.accuracy,
+                 "largest numerical error of a delay, relative (default: "
+                 "0.002)");
   app.add_option("--drive", options.drive, "what drives the cell under test")
       ->check(CLI::IsMember({"matched", "self"}));
   app.add_flag("--all-side-vectors",
@@ -74,6 +80,7 @@ Result<Plan> PlanOf(const PlanOptions& options) {
   }
   for (const Status& check :
        {options.fanouts.empty() ? Ok() : CheckFanouts(options.fanouts),
+        options.accuracy ? CheckAccuracy(*options.accuracy) : Ok(),
         CheckTolerance("--allow-g", options.effort_tolerance),
         CheckTolerance("--allow-p", options.parasitic_tolerance)}) {
     if (!check.ok()) {
@@ -83,6 +90,7 @@ Result<Plan> PlanOf(const PlanOptions& options) {
   plan->node = options.node.value_or(plan->node);
   plan->corners = options.corners.empty() ? plan->corners : options.corners;
   plan->fanouts = options.fanouts.empty() ? plan->fanouts : options.fanouts;
+  plan->accuracy = options.accuracy.value_or(plan->accuracy);
   if (options.drive) {
     plan->drive = *options.drive == "self" ? Drive::kSelf : Drive::kMatched;
   }

@@ -20,6 +20,7 @@ struct PlanOptions {
   std::optional<std::string> node;
   std::vector<std::string> corners;
   std::vector<double> fanouts;
+  std::optional<double> accuracy;
   std::optional<std::string> drive;
   bool all_side_vectors = false;
   std::optional<double> effort_tolerance;

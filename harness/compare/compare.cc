@@ -96,6 +96,7 @@ void Judge(const Figure& figure, double coverage, Comparison& comparison) {
 
 // Fills in what the line says and returns both figures.
 std::array<Figure, 2> Measure(const Calibration& calibration,
+                              double delay_u_relative,
                               Comparison& comparison) {
   const Line& line = *comparison.line;
   const Normalised normalised =
@@ -104,7 +105,9 @@ std::array<Figure, 2> Measure(const Calibration& calibration,
   comparison.effort_mean = normalised.effort_mean;
   comparison.parasitic = normalised.parasitic;
   comparison.bent =
-      TestLinearity(line, comparison.points, calibration.tau_s.value).bent;
+      TestLinearity(
+          line, comparison.points, calibration.tau_s.value, delay_u_relative)
+          .bent;
 
   const Measured hand_effort{comparison.estimate.effort, 0.0};
   const Measured effort_difference = Difference(normalised.effort, hand_effort);
@@ -149,13 +152,14 @@ Comparison WithoutLine(const MeasuredArc& measured,
 
 Comparison Compare(const MeasuredArc& measured,
                    const Calibration& calibration,
-                   const Tolerance& tolerance) {
+                   const Tolerance& tolerance,
+                   double delay_u_relative) {
   Comparison comparison = WithoutLine(measured, calibration, tolerance);
   if (!measured.failures.empty()) {
     comparison.reason = FirstFailure(measured.failures);
     return comparison;
   }
-  const Result<Line> line = FitLine(measured.points);
+  const Result<Line> line = FitLine(measured.points, delay_u_relative);
   if (!line.ok()) {
     comparison.reason = line.error().message;
     return comparison;
@@ -168,7 +172,7 @@ Comparison Compare(const MeasuredArc& measured,
     return comparison;
   }
   comparison.line = *line;
-  const auto figures = Measure(calibration, comparison);
+  const auto figures = Measure(calibration, delay_u_relative, comparison);
   if (!figures[0].difference.u || !figures[1].difference.u) {
     comparison.reason =
         "uncertainty unknown: needs three points or more, of the arc and of "

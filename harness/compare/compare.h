@@ -12,7 +12,7 @@
 //   within        otherwise
 //
 // One failed job leaves the whole arc not measured: a bent arc's slope depends
-// on the fanouts it is taken over, and they must be the reference inverter's.
+// on the fanouts it is taken over.
 
 #ifndef GATEDYNO_COMPARE_COMPARE_H_
 #define GATEDYNO_COMPARE_COMPARE_H_
@@ -39,10 +39,13 @@ struct MeasuredArc {
 // the effort at loads inside the cell that it contains (Estimate::inner_effort,
 // zero for cells of one stage).  For a textbook comparison pass a calibration
 // with p_inv = {1.0, 0.0}.
+// `delay_u_relative` is the numerical standard uncertainty of each delay,
+// relative (fit/line_fit.h).
 // REQUIRES: hand effort and node count above zero, inner effort not above it.
 Comparison Compare(const MeasuredArc& measured,
                    const Calibration& calibration,
-                   const Tolerance& tolerance);
+                   const Tolerance& tolerance,
+                   double delay_u_relative = 0.0);
 
 }  // namespace gatedyno
 

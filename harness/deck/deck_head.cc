@@ -15,10 +15,6 @@ std::string DeckHead(const Bench& bench) {
                   DeckRemark(corner.process),
                   corner.supply_v,
                   corner.temperature_c);
-  text += fmt::format(".options reltol={} chgtol={} trtol={} num_threads=1\n",
-                      bench.settings.reltol,
-                      bench.settings.chgtol_c,
-                      bench.settings.trtol);
   if (bench.node->option_scale_m) {
     text += fmt::format(".option scale={}\n", *bench.node->option_scale_m);
   }

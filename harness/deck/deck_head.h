@@ -1,23 +1,15 @@
-// The lines of a deck that say where it is simulated: node, corner, settings.
+// The lines of a deck that say where it is simulated: node and corner.
 
 #ifndef GATEDYNO_DECK_DECK_HEAD_H_
 #define GATEDYNO_DECK_DECK_HEAD_H_
 
+#include <cstddef>
+#include <optional>
 #include <string>
 
 #include "harness/node/process_node.h"
 
 namespace gatedyno {
-
-// The simulator's defaults are wrong for femtofarad circuits: its charge
-// tolerance, 1e-14 C, exceeds the charge on a gate, so that local error
-// control never bites.  With these the delay of an FO4 edge is within 1e-4 of
-// a 0.1 ps step's at a twentieth of the time.
-struct SimSettings {
-  double reltol = 1e-4;
-  double chgtol_c = 1e-18;
-  double trtol = 1.0;
-};
 
 // Where a deck is simulated.
 struct Bench {
@@ -25,10 +17,12 @@ struct Bench {
   Corner corner;
   std::string models_fingerprint;  // Of the corner's process.
   std::string simulator;           // Name and version, for the job's key.
-  SimSettings settings;
+  size_t rung = 0;                 // Of the ladder; see sim_settings.h.
+  // Wall clock for one job, in place of an estimate.
+  std::optional<double> time_limit_s = std::nullopt;
 };
 
-// Options, temperature, process parameters and supply; everything but the
+// Temperature, process parameters and supply; everything but the
 // models, so that it is the same wherever they are installed.
 std::string DeckHead(const Bench& bench);
 

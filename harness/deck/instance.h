@@ -18,8 +18,10 @@
 #ifndef GATEDYNO_DECK_INSTANCE_H_
 #define GATEDYNO_DECK_INSTANCE_H_
 
+#include <array>
 #include <map>
 #include <string>
+#include <vector>
 
 #include "harness/netlist/cell.h"
 #include "harness/node/process_node.h"
@@ -27,7 +29,6 @@
 namespace gatedyno {
 
 struct Instance {
-  const Cell* cell = nullptr;
   std::string prefix;                 // Of its device and inner net names.
   std::map<NetId, std::string> nets;  // The deck's nets on the cell's pins.
                                       // Pins left out get inner nets; supplies
@@ -35,7 +36,30 @@ struct Instance {
   double copies = 1.0;                // In parallel; need not be whole.
 };
 
-std::string InstanceLines(const Instance& instance, const ProcessNode& node);
+// Writes instances of one cell; what they have in common is made once.
+class CellWriter {
+ public:
+  // `cell` outlives the writer.  REQUIRES: every device is one of the node's.
+  CellWriter(const Cell& cell, const ProcessNode& node);
+
+  std::string Lines(const Instance& instance) const;
+
+ private:
+  struct Device {
+    bool is_subcircuit = false;
+    double multiplicity = 1.0;
+    std::array<NetId, 4> nets = {};  // Drain, gate, source, body.
+    // " MODEL w=... m=", where the multiplicity goes; of a subcircuit, all.
+    std::string text;
+  };
+
+  Device DeviceText(const Mosfet& mosfet, const ProcessNode& node) const;
+
+  const Cell& cell_;
+  std::vector<Device> devices_;
+  std::vector<std::string> fixed_nets_;  // By net: supplies and bodies.
+  bool has_subcircuit_ = false;
+};
 
 }  // namespace gatedyno
 

@@ -4,12 +4,14 @@
 #include <cassert>
 
 #include <fmt/format.h>
+#include <fmt/ranges.h>
 
 #include "harness/base/fingerprint.h"
 #include "harness/base/text.h"
 #include "harness/deck/deck_text.h"
 #include "harness/deck/instance.h"
 #include "harness/deck/reference.h"
+#include "harness/deck/sim_settings.h"
 #include "harness/deck/stage_measures.h"
 #include "harness/deck/stimulus.h"
 
@@ -28,9 +30,10 @@ NetId PinNamed(const Cell& cell, const std::string& name) {
 class StageWriter {
  public:
   StageWriter(const Bench& bench, const StageTest& test)
-      : bench_(bench),
-        test_(test),
-        reference_(ReferenceInverter(*bench.node)) {}
+      : test_(test),
+        reference_(ReferenceInverter(*bench.node)),
+        write_reference_(reference_, *bench.node),
+        write_cell_(*test.cell, *bench.node) {}
 
   std::string Circuit() {
     const double h = test_.fanout;
@@ -61,10 +64,10 @@ class StageWriter {
                    const char* in,
                    const char* out,
                    double copies) {
-    Instance instance{&reference_, prefix, {}, copies};
+    Instance instance{prefix, {}, copies};
     instance.nets[PinNamed(reference_, "a")] = in;
     instance.nets[PinNamed(reference_, "y")] = out;
-    Add(role, instance);
+    Add(role, reference_, write_reference_, instance);
   }
 
   void AddCell(const char* role,
@@ -73,27 +76,31 @@ class StageWriter {
                const char* out,
                double copies) {
     const Cell& cell = *test_.cell;
-    Instance instance{&cell, prefix, {}, copies};
+    Instance instance{prefix, {}, copies};
     for (const SideInput& side : test_.arc.side) {
       instance.nets[PinNamed(cell, side.pin)] =
           side.high ? kPowerNet : kGroundNet;
     }
     instance.nets[PinNamed(cell, test_.arc.pin)] = in;
     instance.nets[PinNamed(cell, test_.arc.output)] = out;
-    Add(role, instance);
+    Add(role, cell, write_cell_, instance);
   }
 
-  void Add(const char* role, const Instance& instance) {
+  void Add(const char* role,
+           const Cell& cell,
+           const CellWriter& writer,
+           const Instance& instance) {
     text_ += fmt::format("* {}: {} copies of {}\n",
                          role,
                          DeckNumber(instance.copies),
-                         DeckRemark(instance.cell->name));
-    text_ += InstanceLines(instance, *bench_.node);
+                         DeckRemark(cell.name));
+    text_ += writer.Lines(instance);
   }
 
-  const Bench& bench_;
   const StageTest& test_;
   const Cell reference_;
+  const CellWriter write_reference_;
+  const CellWriter write_cell_;
   std::string text_;
 };
 
@@ -113,12 +120,26 @@ double ChainDelayTau(const StageTest& test) {
 }
 
 // All that decides the outcome, wherever the models are installed.
-std::string KeyOf(const Bench& bench, const std::string& text, const Job& job) {
-  return Fingerprint(fmt::format("{}\n{}\n{}\n{}",
+std::string KeyOf(const Bench& bench,
+                  const std::string& circuit,
+                  const std::string& measures,
+                  const Job& job) {
+  return Fingerprint(fmt::format("{}\n{}\n{}\n{}\n{}",
                                  bench.simulator,
                                  bench.models_fingerprint,
-                                 text,
-                                 MeasureLines(job)));
+                                 fmt::join(job.settings, ""),
+                                 circuit,
+                                 measures));
+}
+
+// A device takes about 4 us a time point and a deck 250 to 500 points, on a
+// processor of 2020; reading a foundry's library takes seconds.
+double TimeLimit(const StageTest& test) {
+  constexpr double kReading = 30.0;
+  constexpr double kPerDevice = 0.2;
+  constexpr double kStages = 5.0;
+  return kReading +
+         kPerDevice * kStages * static_cast<double>(test.cell->mosfets.size());
 }
 
 }  // namespace
@@ -137,12 +158,15 @@ Job StageJob(const Bench& bench, const StageTest& test) {
                           test.arc.output,
                           test.fanout,
                           bench.corner.name);
+  job.settings = SettingsLadder(bench.rung);
   job.stop_s = stimulus.stop_s();
+  job.time_limit_s = bench.time_limit_s.value_or(TimeLimit(test));
   AddStageMeasures(test.arc.inverting(), supply_v, job);
+  const std::string measures = MeasureLines(job);
   const std::string circuit = DeckHead(bench) + SourceLine(stimulus, supply_v) +
                               StageWriter(bench, test).Circuit() +
                               TransientLine(stimulus);
-  job.key = KeyOf(bench, circuit, job);
+  job.key = KeyOf(bench, circuit, measures, job);
   job.deck = fmt::format("* {} {} {}, fanout {}, {} drive\n{}{}{}.end\n",
                          DeckRemark(test.arc.cell),
                          DeckRemark(DescribeArc(test.arc)),
@@ -151,7 +175,7 @@ Job StageJob(const Bench& bench, const StageTest& test) {
                          DriveName(test.drive),
                          circuit,
                          ModelLines(bench),
-                         MeasureLines(job));
+                         measures);
   return job;
 }
 

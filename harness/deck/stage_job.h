@@ -34,7 +34,7 @@ struct StageTest {
 double DriverEffort(const Estimate& estimate, double fanout);
 
 // Jobs of the two edges of an arc are equal, key and all, where their hand
-// efforts are.
+// efforts are.  The time limit is a hundred times what such a deck takes.
 Job StageJob(const Bench& bench, const StageTest& test);
 
 }  // namespace gatedyno

@@ -66,12 +66,17 @@ std::string MeasureLines(const Job& job) {
   return text;
 }
 
+double DelayOf(const Outcome& outcome, Edge edge) {
+  return outcome.values_s.at(Name("delay", edge));
+}
+
 Point PointOf(const Outcome& outcome, const Arc& arc, double fanout) {
   return {
       .fanout = fanout,
-      .delay_s = outcome.values_s.at(Name("delay", arc.edge)),
+      .delay_s = DelayOf(outcome, arc.edge),
       .input_transition_s = outcome.values_s.at(Name("input", arc.input_edge)),
-      .output_transition_s = outcome.values_s.at(Name("output", arc.edge))};
+      .output_transition_s = outcome.values_s.at(Name("output", arc.edge)),
+      .job_key = {}};
 }
 
 }  // namespace gatedyno

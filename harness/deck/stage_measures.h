@@ -25,7 +25,8 @@ void AddStageMeasures(bool inverting, double supply_v, Job& job);
 // The intervals as .meas lines, for whoever runs the deck by hand.
 std::string MeasureLines(const Job& job);
 
-// REQUIRES: `outcome` is measured, on a job with stage measures.
+// Each REQUIRES: `outcome` is measured, on a job with stage measures.
+double DelayOf(const Outcome& outcome, Edge edge);
 Point PointOf(const Outcome& outcome, const Arc& arc, double fanout);
 
 }  // namespace gatedyno

@@ -15,8 +15,10 @@ namespace {
 // 2 %.  It starts well below, because the calibration does not know tau yet and
 // takes one several times too large.
 constexpr double kRampInTau = 1.5;
-constexpr double kSettling = 5.0;     // Windows per sum of 50 % delays.
-constexpr double kStepsPerHalf = 20;  // Largest time step.
+constexpr double kSettling = 5.0;  // Windows per sum of 50 % delays.
+// Largest time step.  Edges are found by the source's own corners and followed
+// by local error control; this only keeps flat stretches from one long step.
+constexpr double kStepsPerHalf = 8;
 
 // Up to two digits, so that decks stay the same for tiny changes of tau.
 double RoundUp(double seconds) {

@@ -15,8 +15,9 @@ constexpr double kFo4Fanout = 4.0;
 
 Result<Line> FitReference(const Corner& corner,
                           Edge edge,
-                          std::span<const Point> points) {
-  Result<Line> line = FitLine(points);
+                          std::span<const Point> points,
+                          double delay_u_relative) {
+  Result<Line> line = FitLine(points, delay_u_relative);
   if (!line.ok()) {
     return BadInput(fmt::format("reference inverter at {}, {}: {}",
                                 corner.name,
@@ -54,12 +55,15 @@ Measured Mean(const Measured& a, const Measured& b) {
 
 Result<Calibration> Calibrate(const Corner& corner,
                               std::span<const Point> rise,
-                              std::span<const Point> fall) {
-  const Result<Line> rising = FitReference(corner, Edge::kRise, rise);
+                              std::span<const Point> fall,
+                              double delay_u_relative) {
+  const Result<Line> rising =
+      FitReference(corner, Edge::kRise, rise, delay_u_relative);
   if (!rising.ok()) {
     return Forward(rising);
   }
-  const Result<Line> falling = FitReference(corner, Edge::kFall, fall);
+  const Result<Line> falling =
+      FitReference(corner, Edge::kFall, fall, delay_u_relative);
   if (!falling.ok()) {
     return Forward(falling);
   }

@@ -20,13 +20,15 @@
 
 namespace gatedyno {
 
-// `rise` and `fall` are the points of the inverter's rising and falling output.
+// `rise` and `fall` are the points of the inverter's rising and falling output,
+// whose delays have the relative standard uncertainty `delay_u_relative`.
 // FO4 is a measured delay where fanout 4 is among the points, else the line's.
 // Fails with kBadInput, naming the corner and the edge, where there is no line
 // or the delay does not grow with the fanout.
 Result<Calibration> Calibrate(const Corner& corner,
                               std::span<const Point> rise,
-                              std::span<const Point> fall);
+                              std::span<const Point> fall,
+                              double delay_u_relative = 0.0);
 
 }  // namespace gatedyno
 

@@ -36,7 +36,7 @@ Status CheckPoints(std::span<const Point> points) {
 
 }  // namespace
 
-Result<Line> FitLine(std::span<const Point> points) {
+Result<Line> FitLine(std::span<const Point> points, double delay_u_relative) {
   if (const Status checked = CheckPoints(points); !checked.ok()) {
     return Forward(checked);
   }
@@ -63,10 +63,18 @@ Result<Line> FitLine(std::span<const Point> points) {
   line.largest_residual_s = residual.abs().maxCoeff();
   if (line.points > 2) {
     const double variance = residual.square().sum() / (line.points - 2);
-    line.slope_u_s = std::sqrt(variance / sxx);
+    const Eigen::ArrayXd delay_u = delay_u_relative * (y + mean_y);
+    const Eigen::ArrayXd slope_weight = x / sxx;
+    const Eigen::ArrayXd intercept_weight =
+        1.0 / line.points - mean_x * slope_weight;
+    const auto combined = [&](const Eigen::ArrayXd& a,
+                              const Eigen::ArrayXd& b) {
+      return variance * (a * b).sum() + (a * b * delay_u.square()).sum();
+    };
+    line.slope_u_s = std::sqrt(combined(slope_weight, slope_weight));
     line.intercept_u_s =
-        std::sqrt(variance * (1.0 / line.points + mean_x * mean_x / sxx));
-    line.covariance_s2 = -mean_x * variance / sxx;
+        std::sqrt(combined(intercept_weight, intercept_weight));
+    line.covariance_s2 = combined(slope_weight, intercept_weight);
   }
   return line;
 }

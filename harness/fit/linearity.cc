@@ -13,13 +13,25 @@ namespace {
 
 constexpr int kParabolaTerms = 3;
 
-// Fits a + b z + c z^2 with the fanouts mapped to z in [-1, 1].  The nearest
-// line to c z^2 there is the constant c/2, so the parabola leaves it by c/2.
-std::optional<Measured> BendInTau(std::span<const Point> points, double tau_s) {
-  const auto count = static_cast<Eigen::Index>(points.size());
-  if (count <= kParabolaTerms) {
-    return std::nullopt;
+struct Bend {
+  double value_tau = 0.0;
+  double scatter_u_tau = 0.0;    // Of the points about the parabola.
+  double numerical_u_tau = 0.0;  // Of their delays.
+  int freedom = 0;
+
+  double expanded_tau() const {
+    const double scatter =
+        freedom > 0 ? CoverageFactor(freedom) * scatter_u_tau : 0.0;
+    constexpr double kManyDegrees = 2.0;
+    return std::hypot(scatter, kManyDegrees * numerical_u_tau);
   }
+};
+
+// Fits a + b z + c z^2.
+std::optional<Bend> BendInTau(std::span<const Point> points,
+                              double tau_s,
+                              double delay_u_relative) {
+  const auto count = static_cast<Eigen::Index>(points.size());
   const auto [low, high] = std::minmax_element(
       points.begin(), points.end(), [](const Point& a, const Point& b) {
         return a.fanout < b.fanout;
@@ -39,11 +51,20 @@ std::optional<Measured> BendInTau(std::span<const Point> points, double tau_s) {
     return std::nullopt;
   }
   const Eigen::Vector3d parabola = solver.solve(delay_tau);
-  const double variance = (terms * parabola - delay_tau).squaredNorm() /
-                          static_cast<double>(count - kParabolaTerms);
   const Eigen::Matrix3d cofactor = (terms.transpose() * terms).inverse();
-  return Measured{parabola[2] / 2.0,
-                  std::sqrt(variance * cofactor(2, 2)) / 2.0};
+  const Eigen::VectorXd weights =
+      (cofactor.row(2) * terms.transpose()).transpose();
+  Bend bend;
+  bend.value_tau = parabola[2] / 2.0;
+  bend.freedom = static_cast<int>(count) - kParabolaTerms;
+  bend.numerical_u_tau =
+      delay_u_relative * weights.cwiseProduct(delay_tau).norm() / 2.0;
+  if (bend.freedom > 0) {
+    const double variance =
+        (terms * parabola - delay_tau).squaredNorm() / bend.freedom;
+    bend.scatter_u_tau = std::sqrt(variance * cofactor(2, 2)) / 2.0;
+  }
+  return bend;
 }
 
 }  // namespace
@@ -51,20 +72,28 @@ std::optional<Measured> BendInTau(std::span<const Point> points, double tau_s) {
 Linearity TestLinearity(const Line& line,
                         std::span<const Point> points,
                         double tau_s,
+                        double delay_u_relative,
                         const LinearityLimits& limits) {
   assert(tau_s > 0.0);
   const double scale = std::max(1.0, line.slope_s / tau_s);
   Linearity result;
   result.largest_residual_tau = line.largest_residual_s / tau_s;
-  result.bend_tau = BendInTau(points, tau_s);
   result.bent = result.largest_residual_tau > limits.residual_tau * scale;
-  if (result.bend_tau) {
-    const int freedom = static_cast<int>(points.size()) - kParabolaTerms;
-    const double bend = std::abs(result.bend_tau->value);
-    const bool certain =
-        bend > CoverageFactor(freedom) * result.bend_tau->u.value_or(0.0);
-    result.bent |= certain && bend > limits.bend_tau * scale;
+  const auto least = static_cast<size_t>(
+      delay_u_relative > 0.0 ? kParabolaTerms : kParabolaTerms + 1);
+  const std::optional<Bend> bend =
+      points.size() >= least ? BendInTau(points, tau_s, delay_u_relative)
+                             : std::nullopt;
+  if (!bend) {
+    return result;
   }
+  result.bend_tau = Measured{
+      bend->value_tau, std::hypot(bend->scatter_u_tau, bend->numerical_u_tau)};
+  const double size = std::abs(bend->value_tau);
+  const double expanded = bend->expanded_tau();
+  const double limit = limits.bend_tau * scale;
+  result.bent |= size > expanded && size > limit;
+  result.straight = !result.bent && size + expanded <= limit;
   return result;
 }
 

@@ -1,15 +1,20 @@
 // Does a line describe the points?
 //
 // Measured arcs are smooth rather than noisy, so what is left over a line is
-// mostly its bend.  An arc is *bent* when either
+// mostly its bend: by how much the parabola through the points leaves the
+// nearest straight line, c/2 for c z^2 with the fanouts mapped to z in [-1, 1].
+// U is the expanded uncertainty of that, from the scatter about the parabola
+// (k u, coverage.h; four points or more) and from the numerical error of the
+// delays (2 u).  An arc is
 //
-//   - one point is further from the line than `residual_tau`, or
-//   - a parabola fits better, beyond its own uncertainty (U = k u, coverage.h),
-//     and leaves the nearest straight line by more than `bend_tau` in between:
-//     a bend misleads beyond the points, scatter of the same size does not.
+//   bent      when one point is further from the line than `residual_tau`, or
+//             |bend| exceeds both U and `bend_tau`: a bend misleads beyond the
+//             points, scatter of the same size does not;
+//   straight  when no point is, and |bend| + U is at most `bend_tau`.
 //
-// Both limits are in tau and grow with the slope where that is above tau: on a
-// gate of effort 8 a tenth of tau is a hundredth of a fanout.
+// Between the two it takes more points to tell.  Both limits are in tau and
+// grow with the slope where that is above tau: on a gate of effort 8 a tenth of
+// tau is a hundredth of a fanout.
 
 #ifndef GATEDYNO_FIT_LINEARITY_H_
 #define GATEDYNO_FIT_LINEARITY_H_
@@ -30,16 +35,20 @@ struct LinearityLimits {
 
 struct Linearity {
   bool bent = false;
+  bool straight = false;
   double largest_residual_tau = 0.0;
-  // Signed: positive when the delay grows faster at large fanouts.  None below
-  // four points or three distinct fanouts, where the test cannot be made.
+  // Signed: positive when the delay grows faster at large fanouts.  None where
+  // the test cannot be made: below three distinct fanouts, and for three points
+  // of unknown numerical error.
   std::optional<Measured> bend_tau;
 };
 
-// `line` is the fit of `points`.  REQUIRES: tau_s > 0.
+// `line` is the fit of `points`, each of whose delays has the relative standard
+// uncertainty `delay_u_relative` (0: unknown).  REQUIRES: tau_s > 0.
 Linearity TestLinearity(const Line& line,
                         std::span<const Point> points,
                         double tau_s,
+                        double delay_u_relative = 0.0,
                         const LinearityLimits& limits = {});
 
 }  // namespace gatedyno

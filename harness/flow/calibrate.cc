@@ -1,12 +1,11 @@
 #include "harness/flow/calibrate.h"
 
-#include <vector>
+#include <utility>
 
 #include <fmt/format.h>
 
 #include "harness/deck/reference.h"
 #include "harness/fit/calibration.h"
-#include "harness/flow/arc_sweep.h"
 #include "harness/node/model_check.h"
 
 namespace gatedyno {
@@ -17,48 +16,38 @@ namespace {
 // only makes the calibration's own runs longer.
 constexpr double kTauPerLengthSPerM = 1e-4;
 
-struct InverterSweeps {
-  ArcSweep rise;
-  ArcSweep fall;
-};
-
-InverterSweeps PlanInverter(const Bench& bench,
-                            const Cell& inverter,
-                            const std::vector<double>& fanouts) {
+StageTest InverterTest(const ProcessNode& node,
+                       const Cell& inverter,
+                       Edge edge) {
   StageTest test;
   test.cell = &inverter;
   test.estimate = {.effort = 1.0,
                    .parasitic_by_nodes = 1.0,
                    .parasitic_by_elmore = 1.0,
                    .fixed_first_effort = {}};
-  test.time_unit_s = kTauPerLengthSPerM * bench.node->drawn_length_m;
+  test.time_unit_s = kTauPerLengthSPerM * node.drawn_length_m;
   test.arc = {.cell = inverter.name,
               .pin = inverter.net_name(inverter.pins[0]),
               .output = inverter.net_name(inverter.pins[1]),
-              .input_edge = Edge::kFall,
-              .edge = Edge::kRise,
+              .input_edge = Opposite(edge),
+              .edge = edge,
               .side = {}};
-  InverterSweeps sweeps;
-  sweeps.rise = PlanSweep(bench, test, fanouts);
-  test.arc.input_edge = Edge::kRise;
-  test.arc.edge = Edge::kFall;
-  sweeps.fall = PlanSweep(bench, test, fanouts);
-  return sweeps;
+  return test;
 }
 
 void Settle(const Corner& corner,
-            const InverterSweeps& sweeps,
-            const OutcomeBook& book,
+            const ReferenceArcs& arcs,
+            double delay_u_relative,
             CalibrationSet* set) {
-  const MeasuredArc rise = CollectSweep(sweeps.rise, book);
-  const MeasuredArc fall = CollectSweep(sweeps.fall, book);
-  if (!rise.failures.empty()) {
-    set->failures[corner.name] = fmt::format(
-        "the reference inverter was not measured: {}", rise.failures.front());
-    return;
+  for (const MeasuredArc* arc : {&arcs.rise, &arcs.fall}) {
+    if (!arc->failures.empty()) {
+      set->failures[corner.name] = fmt::format(
+          "the reference inverter was not measured: {}", arc->failures.front());
+      return;
+    }
   }
   const Result<Calibration> calibration =
-      Calibrate(corner, rise.points, fall.points);
+      Calibrate(corner, arcs.rise.points, arcs.fall.points, delay_u_relative);
   if (calibration.ok()) {
     set->by_corner[corner.name] = *calibration;
   } else {
@@ -68,44 +57,66 @@ void Settle(const Corner& corner,
 
 }  // namespace
 
-Result<Bench> BenchAt(const PreparedRun& run,
-                      const Corner& corner,
-                      const std::string& simulator) {
-  const Result<std::string> fingerprint =
-      ModelsFingerprint(ProcessOf(run.node, corner));
-  if (!fingerprint.ok()) {
-    return Forward(fingerprint);
+Result<Benches> BenchesOf(const PreparedRun& run,
+                          const std::string& simulator) {
+  // Reading a foundry's library takes a while, and corners share it.
+  std::map<std::string, std::string> fingerprints;  // By process.
+  Benches benches;
+  for (const Corner& corner : run.corners) {
+    std::string& fingerprint = fingerprints[corner.process];
+    if (fingerprint.empty()) {
+      Result<std::string> made = ModelsFingerprint(ProcessOf(run.node, corner));
+      if (!made.ok()) {
+        return Forward(made);
+      }
+      fingerprint = *std::move(made);
+    }
+    benches[corner.name] = {.node = &run.node,
+                            .corner = corner,
+                            .models_fingerprint = fingerprint,
+                            .simulator = simulator,
+                            .rung = RungFor(run.plan.accuracy),
+                            .time_limit_s = run.plan.time_limit_s};
   }
-  return Bench{.node = &run.node,
-               .corner = corner,
-               .models_fingerprint = *fingerprint,
-               .simulator = simulator,
-               .settings = {}};
+  return benches;
 }
 
-Result<CalibrationSet> CalibrateCorners(const PreparedRun& run,
-                                        const std::string& simulator,
-                                        OutcomeBook* book) {
+Result<std::map<std::string, ReferenceArcs>> MeasureReferences(
+    const PreparedRun& run, const Benches& benches, ArcContext context) {
   const Cell inverter = ReferenceInverter(run.node);
-  std::vector<InverterSweeps> sweeps;
-  std::vector<Job> jobs;
-  for (const Corner& corner : run.corners) {
-    const Result<Bench> bench = BenchAt(run, corner, simulator);
-    if (!bench.ok()) {
-      return Forward(bench);
+  std::map<std::string, ReferenceArcs> references;
+  context.always_checked = true;
+  auto corner = run.corners.begin();
+  const Status done = context.desk->Work([&] {
+    if (corner == run.corners.end()) {
+      return false;
     }
-    sweeps.push_back(PlanInverter(*bench, inverter, run.plan.fanouts));
-    for (const ArcSweep* sweep : {&sweeps.back().rise, &sweeps.back().fall}) {
-      jobs.insert(jobs.end(), sweep->jobs.begin(), sweep->jobs.end());
+    ReferenceArcs& arcs = references[corner->name];
+    context.bench = &benches.at(corner->name);
+    for (const Edge edge : {Edge::kRise, Edge::kFall}) {
+      MeasuredArc& arc = edge == Edge::kRise ? arcs.rise : arcs.fall;
+      constexpr double kOwnTau = 0.0;
+      MeasureArc(context,
+                 InverterTest(run.node, inverter, edge),
+                 kOwnTau,
+                 [&arc](MeasuredArc measured) { arc = std::move(measured); });
     }
+    ++corner;
+    return true;
+  });
+  if (!done.ok()) {
+    return Forward(done);
   }
-  const Status finished = book->Finish(jobs);
-  if (!finished.ok()) {
-    return Forward(finished);
-  }
+  return references;
+}
+
+CalibrationSet CalibrateCorners(
+    const PreparedRun& run,
+    const std::map<std::string, ReferenceArcs>& references,
+    double delay_u_relative) {
   CalibrationSet set;
-  for (size_t i = 0; i < run.corners.size(); ++i) {
-    Settle(run.corners[i], sweeps[i], *book, &set);
+  for (const Corner& corner : run.corners) {
+    Settle(corner, references.at(corner.name), delay_u_relative, &set);
   }
   return set;
 }

@@ -29,6 +29,7 @@ Result<Plan> LoadPlan(const std::filesystem::path& path) {
   plan.cells = in["cells"].get<std::vector<std::string>>();
   plan.corners = in.value("corners", plan.corners);
   plan.fanouts = in.value("fanouts", plan.fanouts);
+  plan.accuracy = in.value("accuracy", plan.accuracy);
   plan.drive =
       in.value("drive", "matched") == "self" ? Drive::kSelf : Drive::kMatched;
   plan.all_side_vectors = in.value("side_vectors", "worst") == "all";
@@ -41,17 +42,33 @@ Result<Plan> LoadPlan(const std::filesystem::path& path) {
 }
 
 json PlanToJson(const Plan& plan) {
-  return {{"format", kFormat},
-          {"title", plan.title},
-          {"node", plan.node},
-          {"cells", plan.cells},
-          {"corners", plan.corners},
-          {"fanouts", plan.fanouts},
-          {"drive", DriveName(plan.drive)},
-          {"side_vectors", plan.all_side_vectors ? "all" : "worst"},
-          {"tolerances",
-           {{"effort", plan.tolerance.effort},
-            {"parasitic", plan.tolerance.parasitic}}}};
+  json out = {{"format", kFormat},
+              {"title", plan.title},
+              {"node", plan.node},
+              {"cells", plan.cells},
+              {"accuracy", plan.accuracy},
+              {"drive", DriveName(plan.drive)},
+              {"side_vectors", plan.all_side_vectors ? "all" : "worst"},
+              {"tolerances",
+               {{"effort", plan.tolerance.effort},
+                {"parasitic", plan.tolerance.parasitic}}}};
+  if (!plan.corners.empty()) {
+    out["corners"] = plan.corners;
+  }
+  if (!plan.fanouts.empty()) {
+    out["fanouts"] = plan.fanouts;
+  }
+  return out;
+}
+
+Status CheckAccuracy(double accuracy) {
+  if (!(accuracy >= kFinestAccuracy && accuracy <= kCoarsestAccuracy)) {
+    return BadInput(fmt::format("--accuracy: {}: must be {} to {}",
+                                accuracy,
+                                kFinestAccuracy,
+                                kCoarsestAccuracy));
+  }
+  return Ok();
 }
 
 Status CheckFanouts(const std::vector<double>& fanouts) {

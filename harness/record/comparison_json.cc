@@ -119,14 +119,16 @@ json Write(const Point& point) {
   return {{"fanout", Write(point.fanout)},
           {"delay_s", Write(point.delay_s)},
           {"input_transition_s", Write(point.input_transition_s)},
-          {"output_transition_s", Write(point.output_transition_s)}};
+          {"output_transition_s", Write(point.output_transition_s)},
+          {"job_key", point.job_key}};
 }
 
 Point ReadPoint(const json& from) {
   return {.fanout = ReadNumber(from, "fanout"),
           .delay_s = ReadNumber(from, "delay_s"),
           .input_transition_s = ReadNumber(from, "input_transition_s"),
-          .output_transition_s = ReadNumber(from, "output_transition_s")};
+          .output_transition_s = ReadNumber(from, "output_transition_s"),
+          .job_key = ReadText(from, "job_key")};
 }
 
 json Write(const Line& line) {

@@ -4,6 +4,7 @@
 #ifndef GATEDYNO_RECORD_JOB_H_
 #define GATEDYNO_RECORD_JOB_H_
 
+#include <cstddef>
 #include <string>
 #include <vector>
 
@@ -12,7 +13,7 @@
 namespace gatedyno {
 
 // The `occurrence`-th time (from 1) that v(net) passes `level_v` in direction
-// `edge`, found by linear interpolation between time points.
+// `edge`.
 struct Crossing {
   std::string net;
   double level_v = 0.0;
@@ -44,12 +45,27 @@ struct SwingCheck {
 struct Job {
   std::string key;    // Fingerprint of all that decides the outcome.
   std::string label;  // For people: "nand2 a->y h=4 typical".
-  std::string deck;   // Whole text; runs unchanged under a plain simulator.
+  // The text but for the simulator's settings; see DeckText.
+  std::string deck;
+  // Lines that set the simulator, one text a rung: what is tried first, then
+  // ever more careful ones.  None for a deck that brings its own.
+  std::vector<std::string> settings;
   std::vector<Interval> intervals;
   std::vector<SwingCheck> swings;
-  double stop_s = 0.0;         // The last time point the deck must reach.
-  double time_limit_s = 60.0;  // Wall clock, before the worker is killed.
+  double stop_s = 0.0;  // The last time point the deck must reach.
+  // Wall clock, before the worker is killed; for the first rung.
+  double time_limit_s = 60.0;
+
+  bool operator==(const Job&) const = default;
 };
+
+// How often the job may be tried with other settings, itself included.
+size_t RungCount(const Job& job);
+
+// The whole deck: settings[rung] stand after its first line, the title.  Runs
+// unchanged under a plain simulator.
+// REQUIRES: rung < RungCount(job).
+std::string DeckText(const Job& job, size_t rung);
 
 }  // namespace gatedyno
 

@@ -45,9 +45,9 @@ NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(Crossing, net, level_v, edge, occurrence)
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(Interval, name, from, to)
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(SwingCheck, net, low_v, high_v)
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(
-    Job, key, label, deck, intervals, swings, stop_s, time_limit_s)
+    Job, key, label, deck, settings, intervals, swings, stop_s, time_limit_s)
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(
-    Outcome, ending, values_s, message, simulator_s)
+    Outcome, ending, values_s, message, simulator_s, rung)
 
 namespace {
 

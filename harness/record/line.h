@@ -4,6 +4,7 @@
 #define GATEDYNO_RECORD_LINE_H_
 
 #include <optional>
+#include <string>
 
 namespace gatedyno {
 
@@ -29,14 +30,16 @@ struct Point {
   double delay_s = 0.0;
   double input_transition_s = 0.0;   // 20-80 %, raw (not scaled to 0-100).
   double output_transition_s = 0.0;  // 20-80 %, raw.
+  std::string job_key = {};          // Of the job that measured it.
 };
 
 // delay_s = slope_s * fanout + intercept_s.
 struct Line {
   double slope_s = 0.0;
   double intercept_s = 0.0;
-  // Standard errors, one sigma, and the covariance of slope and intercept.
-  // None for two points: any two lie on a line, so they say nothing of error.
+  // Standard uncertainties, one sigma, and the covariance of slope and
+  // intercept: the residuals' and the simulator's numerical error.  None for
+  // two points: any two lie on a line, so they say nothing of the former.
   std::optional<double> slope_u_s = std::nullopt;
   std::optional<double> intercept_u_s = std::nullopt;
   std::optional<double> covariance_s2 = std::nullopt;

@@ -18,6 +18,7 @@ struct Outcome {
   // The simulator's words, or what killed the worker; empty when measured.
   std::string message;
   double simulator_s = 0.0;  // Processor time spent inside the simulator.
+  int rung = 0;              // Of Job::settings, in the attempt that ended it.
 
   bool measured() const { return ending == Ending::kMeasured; }
 };

@@ -6,6 +6,7 @@
 #include <string>
 #include <vector>
 
+#include "harness/record/accuracy_check.h"
 #include "harness/record/comparison.h"
 
 namespace gatedyno {
@@ -38,7 +39,8 @@ struct RunFacts {
   std::string node;  // Name.
   std::string node_title;
   Drive drive = Drive::kMatched;
-  std::vector<double> fanouts;
+  std::vector<double> fanouts;  // Empty: chosen arc by arc.
+  double accuracy = 0.0;        // Asked for, of each delay.
   Tolerance tolerance;
   std::string program;  // "gatedyno 0.1.0".
   std::string simulator;
@@ -52,6 +54,7 @@ struct RunResult {
   std::vector<Comparison> comparisons;    // By corner, cell, arc.
   std::vector<FailedJob> failed_jobs;
   std::vector<std::string> warnings;
+  AccuracyCheck accuracy;
   JobCounts jobs;
 };
 

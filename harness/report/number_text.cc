@@ -1,5 +1,6 @@
 #include "harness/report/number_text.h"
 
+#include <algorithm>
 #include <cmath>
 
 #include <fmt/format.h>
@@ -24,12 +25,19 @@ std::string Percent(double ratio) {
 }
 
 std::string WithUncertainty(const Measured& measured, int decimals) {
-  return measured.u ? fmt::format("{:.{}f} ±{:.{}f}",
-                                  measured.value,
-                                  decimals,
-                                  *measured.u,
-                                  decimals)
-                    : fmt::format("{:.{}f}", measured.value, decimals);
+  constexpr double kTen = 10.0;
+  // 0.004 is 0.004, however its double is spelt.
+  constexpr double kSpelling = 1e-9;
+  const double unit = std::pow(kTen, -decimals);
+  return measured.u
+             ? fmt::format(
+                   "{:.{}f} ±{:.{}f}",
+                   measured.value,
+                   decimals,
+                   std::ceil(std::max(0.0, *measured.u / unit - kSpelling)) *
+                       unit,
+                   decimals)
+             : fmt::format("{:.{}f}", measured.value, decimals);
 }
 
 std::string FractionText(double value) {

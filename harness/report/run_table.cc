@@ -55,16 +55,40 @@ std::string CornerLines(const Calibration& calibration, const Style& style) {
          '\n';
 }
 
-std::string FactLines(const RunFacts& facts, const Style& style) {
+std::string FanoutText(const RunFacts& facts) {
+  return facts.fanouts.empty()
+             ? "fanouts as each arc needs"
+             : fmt::format("fanouts {:g}", fmt::join(facts.fanouts, " "));
+}
+
+// What the settings were promised to cost, and what they did.
+std::string AccuracyLine(const RunResult& result) {
+  const AccuracyCheck& check = result.accuracy;
+  const auto percent = [](double share) {
+    return fmt::format("{:.2g} %", 100.0 * share);
+  };
+  return fmt::format(
+      "delays to {} by the simulator's settings; {}",
+      percent(result.facts.accuracy),
+      check.delays == 0
+          ? "not checked"
+          : fmt::format("checked on {}: {} root mean square, {} at most",
+                        check.delays,
+                        percent(check.rms),
+                        percent(check.largest)));
+}
+
+std::string FactLines(const RunResult& result, const Style& style) {
+  const RunFacts& facts = result.facts;
   return style.Heading(Wrap(facts.title)) + '\n' +
          Wrap(fmt::format("node {}: {}", facts.node, facts.node_title)) + '\n' +
-         Wrap(fmt::format("{} drive, fanouts {:g}; allowed: g {}, p {} of the "
-                          "hand number",
-                          DriveName(facts.drive),
-                          fmt::join(facts.fanouts, " "),
-                          Percent(facts.tolerance.effort),
-                          Percent(facts.tolerance.parasitic))) +
-         '\n';
+         Wrap(
+             fmt::format("{} drive, {}; allowed: g {}, p {} of the hand number",
+                         DriveName(facts.drive),
+                         FanoutText(facts),
+                         Percent(facts.tolerance.effort),
+                         Percent(facts.tolerance.parasitic))) +
+         '\n' + Wrap(AccuracyLine(result)) + '\n';
 }
 
 std::string CountLine(const RunResult& result, const Summary& summary) {
@@ -105,7 +129,7 @@ class TableWriter {
       : result_(result), style_(style) {}
 
   std::string Text() {
-    text_ = FactLines(result_.facts, style_);
+    text_ = FactLines(result_, style_);
     const auto& rows = result_.comparisons;
     auto from = rows.begin();
     while (from != rows.end()) {

@@ -64,4 +64,10 @@ std::string Wrap(std::string_view paragraph, size_t indent) {
   return wrapped += rest;
 }
 
+std::string OneLine(std::string_view text, size_t columns) {
+  std::string line(text.substr(0, BytesOf(text, columns)));
+  std::replace_if(line.begin(), line.end(), &IsControl, '?');
+  return line;
+}
+
 }  // namespace gatedyno

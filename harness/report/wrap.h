@@ -22,6 +22,9 @@ std::size_t ColumnsOf(std::string_view text);
 // REQUIRES: indent < kColumns.
 std::string Wrap(std::string_view paragraph, std::size_t indent = 2);
 
+// Cut where it is wider than `columns`; control characters become '?'.
+std::string OneLine(std::string_view text, std::size_t columns);
+
 }  // namespace gatedyno
 
 #endif  // GATEDYNO_REPORT_WRAP_H_

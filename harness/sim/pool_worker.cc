@@ -2,6 +2,8 @@
 
 #include <algorithm>
 #include <cassert>
+#include <cmath>
+#include <iterator>
 #include <utility>
 
 #include <fmt/format.h>
@@ -19,7 +21,15 @@ constexpr std::chrono::milliseconds kDeathGrace(200);
 // Converting more than this to the clock's ticks would overflow.
 constexpr double kLongestLimitSeconds = 1e8;
 
+// A rung takes two to three times the steps of the one below.
+constexpr double kSlowerPerRung = 3.0;
+
 }  // namespace
+
+double TimeLimitOf(const Attempt& attempt) {
+  return attempt.job.time_limit_s *
+         std::pow(kSlowerPerRung, static_cast<double>(attempt.rung));
+}
 
 Result<PoolWorker> PoolWorker::Start(
     const std::filesystem::path& program,
@@ -67,26 +77,26 @@ std::string PoolWorker::EndUngreeted(const Status& greeting) {
                        kHelloLimit.count());
   }
   return fmt::format("the worker {} before it was ready",
-                     process_->Finish(kDeathGrace));
+                     process_->Finish(kDeathGrace).words);
 }
 
-void PoolWorker::Give(size_t index, const Job& job, std::string_view job_text) {
+void PoolWorker::Give(Attempt attempt, std::string_view text) {
   assert(greeted());
-  process_->Send(job_text);
-  sent_.push_back({index, job.time_limit_s});
+  process_->Send(text);
+  sent_.push_back(std::move(attempt));
   ++jobs_given_;
   if (sent_.size() == 1) {
     StartClock();
   }
 }
 
-Result<std::optional<Reply>> PoolWorker::TakeReply() {
+Result<std::optional<PoolWorker::Answer>> PoolWorker::TakeReply() {
   const Result<std::optional<std::string>> text = process_->Receive();
   if (!text.ok()) {
     return Forward(text);
   }
   if (!text->has_value()) {
-    return std::optional<Reply>();
+    return std::optional<Answer>();
   }
   Result<Reply> reply = ParseReply(**text);
   if (!reply.ok()) {
@@ -95,26 +105,26 @@ Result<std::optional<Reply>> PoolWorker::TakeReply() {
   if (sent_.empty()) {
     return Internal("a reply to no job");
   }
+  Answer answer{std::move(sent_.front()), *std::move(reply)};
   sent_.pop_front();
   StartClock();
-  return std::optional<Reply>(std::move(*reply));
+  return std::optional<Answer>(std::move(answer));
+}
+
+std::vector<Attempt> PoolWorker::TakeAttempts() {
+  std::vector<Attempt> attempts(std::move_iterator(sent_.begin()),
+                                std::move_iterator(sent_.end()));
+  sent_.clear();
+  return attempts;
 }
 
 void PoolWorker::StartClock() {
   if (!sent_.empty()) {
     const double limit_s =
-        std::min(oldest_time_limit_s(), kLongestLimitSeconds);
+        std::min(TimeLimitOf(sent_.front()), kLongestLimitSeconds);
     deadline_ = Clock::now() + std::chrono::duration_cast<Clock::duration>(
                                    std::chrono::duration<double>(limit_s));
   }
-}
-
-std::vector<size_t> PoolWorker::jobs() const {
-  std::vector<size_t> indices;
-  for (const SentJob& job : sent_) {
-    indices.push_back(job.index);
-  }
-  return indices;
 }
 
 std::optional<PoolWorker::Clock::time_point> PoolWorker::deadline() const {

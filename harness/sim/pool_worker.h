@@ -14,14 +14,18 @@
 #include <memory>
 #include <optional>
 #include <string>
+#include <string_view>
 #include <vector>
 
 #include "harness/base/result.h"
-#include "harness/record/job.h"
+#include "harness/sim/attempt.h"
 #include "harness/sim/protocol.h"
 #include "harness/sim/worker_process.h"
 
 namespace gatedyno {
+
+// Wall clock before a worker at this attempt is killed.
+double TimeLimitOf(const Attempt& attempt);
 
 class PoolWorker {
  public:
@@ -41,39 +45,35 @@ class PoolWorker {
   // REQUIRES: greeted().
   const Hello& hello() const { return *hello_; }
 
-  // Sends one more job, known to the pool as `index`.
+  // Sends one more attempt; `text` is its JobText.
   // REQUIRES: greeted().
-  void Give(size_t index, const Job& job, std::string_view job_text);
+  void Give(Attempt attempt, std::string_view text);
 
-  // The reply to the oldest job, which is then no longer with this worker.
+  struct Answer {
+    Attempt attempt;  // The oldest, which is then no longer with this worker.
+    Reply reply;
+  };
   // Fails when something else came; the worker is then of no more use.
-  Result<std::optional<Reply>> TakeReply();
+  Result<std::optional<Answer>> TakeReply();
 
-  // Oldest first.
-  std::vector<size_t> jobs() const;
+  // Takes all that are with this worker, oldest first.
+  std::vector<Attempt> TakeAttempts();
   size_t job_count() const { return sent_.size(); }
   int jobs_given() const { return jobs_given_; }
 
-  // When the hello or the oldest job's reply is overdue; none when idle.
+  // When the hello or the oldest attempt's reply is overdue; none when idle.
   std::optional<Clock::time_point> deadline() const;
-  // REQUIRES: job_count() > 0.
-  double oldest_time_limit_s() const { return sent_.front().time_limit_s; }
 
   WorkerProcess& process() { return *process_; }
   const WorkerProcess& process() const { return *process_; }
 
  private:
-  struct SentJob {
-    size_t index = 0;
-    double time_limit_s = 0.0;
-  };
-
   PoolWorker() = default;
   void StartClock();
 
   std::unique_ptr<WorkerProcess> process_;
   std::optional<Hello> hello_;
-  std::deque<SentJob> sent_;
+  std::deque<Attempt> sent_;
   int jobs_given_ = 0;
   Clock::time_point deadline_;
 };

@@ -26,11 +26,13 @@ TableRunner::TableRunner(Answer answer) : answer_(std::move(answer)) {}
 TableRunner::TableRunner(std::map<std::string, Outcome> by_label)
     : answer_(FromTable(std::move(by_label))) {}
 
-Status TableRunner::Run(std::span<const Job> jobs,
-                        const OnOutcome& on_outcome) {
-  for (const Job& job : jobs) {
-    asked_.push_back(job);
-    on_outcome(job, answer_(job));
+Status TableRunner::Run(JobSource& jobs, const OnOutcome& on_outcome) {
+  while (const std::optional<Job> job = jobs.Next()) {
+    asked_.push_back(*job);
+    Status kept = on_outcome(*job, answer_(*job));
+    if (!kept.ok()) {
+      return kept;
+    }
   }
   return Ok();
 }

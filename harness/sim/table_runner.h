@@ -21,7 +21,7 @@ class TableRunner : public SimRunner {
   // By Job::label.  A job whose label is not in the table ends as failed.
   explicit TableRunner(std::map<std::string, Outcome> by_label);
 
-  Status Run(std::span<const Job> jobs, const OnOutcome& on_outcome) override;
+  Status Run(JobSource& jobs, const OnOutcome& on_outcome) override;
 
   // Every job asked for so far, in order.
   const std::vector<Job>& asked() const { return asked_; }

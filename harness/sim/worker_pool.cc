@@ -30,10 +30,17 @@ constexpr std::chrono::milliseconds kDeathGrace(200);
 constexpr std::chrono::milliseconds kNoGrace(0);
 
 std::vector<std::string> WorkerArguments(const PoolOptions& options) {
-  if (!options.memory_limit_bytes.has_value()) {
-    return {};
+  return {fmt::format("--memory-limit-bytes={}", options.memory_limit_bytes)};
+}
+
+// What a worker is sent: the job with the one rung it is to be run at.
+Result<std::string> AttemptText(const Attempt& attempt) {
+  if (attempt.job.settings.empty()) {
+    return JobText(attempt.job);
   }
-  return {fmt::format("--memory-limit-bytes={}", *options.memory_limit_bytes)};
+  Job job = attempt.job;
+  job.settings = {attempt.job.settings[attempt.rung]};
+  return JobText(job);
 }
 
 }  // namespace
@@ -71,25 +78,50 @@ WorkerPool::~WorkerPool() {
   }
 }
 
-Status WorkerPool::Run(std::span<const Job> jobs, const OnOutcome& on_outcome) {
+Status WorkerPool::Run(JobSource& jobs, const OnOutcome& on_outcome) {
   const SigpipeGuard guard;
-  Work work = {
-      jobs, on_outcome, JobLedger(jobs.size(), options_.kills_before_aside)};
+  Work work = {AttemptQueue(&jobs), on_outcome, Ok()};
   failed_starts_ = 0;
   DropDeadWorkers();
-  while (work.ledger.unended() > 0) {
-    if (StopRequested() && !AnyJobSent()) {
-      break;
+  while (work.status.ok()) {
+    const size_t sent = JobsSent();
+    const size_t all = static_cast<size_t>(options_.workers);
+    const size_t waiting = work.queue.Waiting(all);
+    if (sent + waiting == 0) {
+      return Ok();
     }
-    StartMissing(work);
-    if (workers_.empty() && failed_starts_ >= kFailedStartsBeforeGivingUp) {
+    StartUpTo(std::min(all, sent + waiting));
+    if (workers_.empty() && StartsKeepFailing()) {
       return Unavailable(last_failed_start_);
     }
     SendJobs(&work);
     WaitForWorkers();
     HandleWorkers(&work);
   }
-  return Ok();
+  // Nobody wants the answers that are still to come.
+  std::erase_if(workers_, [](const PoolWorker& worker) {
+    return worker.job_count() > 0;
+  });
+  return work.status;
+}
+
+Result<std::string> WorkerPool::Simulator() {
+  const SigpipeGuard guard;
+  failed_starts_ = 0;
+  DropDeadWorkers();
+  while (true) {
+    StartUpTo(1);
+    if (workers_.empty()) {
+      return Unavailable(last_failed_start_);
+    }
+    if (workers_.front().greeted()) {
+      return workers_.front().hello().simulator;
+    }
+    WaitForWorkers();
+    std::erase_if(workers_, [&](PoolWorker& worker) {
+      return !worker.greeted() && !HandleGreeting(&worker);
+    });
+  }
 }
 
 // No job is to blame for a worker that died between two calls of Run.
@@ -100,22 +132,16 @@ void WorkerPool::DropDeadWorkers() {
   });
 }
 
-bool WorkerPool::StopRequested() const {
-  return options_.should_stop && options_.should_stop();
+size_t WorkerPool::JobsSent() const {
+  size_t sent = 0;
+  for (const PoolWorker& worker : workers_) {
+    sent += worker.job_count();
+  }
+  return sent;
 }
 
-bool WorkerPool::AnyJobSent() const {
-  return std::any_of(
-      workers_.begin(), workers_.end(), [](const PoolWorker& worker) {
-        return worker.job_count() > 0;
-      });
-}
-
-void WorkerPool::StartMissing(const Work& work) {
-  const size_t wanted =
-      std::min(static_cast<size_t>(options_.workers), work.ledger.unended());
-  while (workers_.size() < wanted &&
-         failed_starts_ < kFailedStartsBeforeGivingUp) {
+void WorkerPool::StartUpTo(size_t wanted) {
+  while (workers_.size() < wanted && !StartsKeepFailing()) {
     Result<PoolWorker> worker =
         PoolWorker::Start(options_.worker_program, WorkerArguments(options_));
     if (worker.ok()) {
@@ -124,6 +150,10 @@ void WorkerPool::StartMissing(const Work& work) {
       NoteFailedStart(worker.error().message);
     }
   }
+}
+
+bool WorkerPool::StartsKeepFailing() const {
+  return failed_starts_ >= kFailedStartsBeforeGivingUp;
 }
 
 void WorkerPool::NoteFailedStart(std::string why) {
@@ -136,10 +166,10 @@ void WorkerPool::SendJobs(Work* work) {
   // nobody sits on a second one that another worker could start.
   for (size_t at_once = 1; at_once <= kJobsPerWorkerAtOnce; ++at_once) {
     for (PoolWorker& worker : workers_) {
-      const bool enough_left =
-          at_once == 1 || work->ledger.waiting() >= workers_.size();
-      if (worker.greeted() && worker.job_count() < at_once && enough_left &&
-          worker.jobs_given() < options_.jobs_per_worker && !StopRequested()) {
+      const bool has_room = worker.greeted() && worker.job_count() < at_once &&
+                            worker.jobs_given() < options_.jobs_per_worker;
+      const size_t enough = at_once == 1 ? 1 : workers_.size();
+      if (has_room && work->queue.Waiting(enough) >= enough) {
         SendNextTo(&worker, work);
       }
     }
@@ -147,16 +177,15 @@ void WorkerPool::SendJobs(Work* work) {
 }
 
 void WorkerPool::SendNextTo(PoolWorker* worker, Work* work) {
-  while (const std::optional<size_t> index = work->ledger.Take()) {
-    const Job& job = work->jobs[*index];
-    const Result<std::string> text = JobText(job);
+  while (std::optional<Attempt> attempt = work->queue.Take()) {
+    const Result<std::string> text = AttemptText(*attempt);
     if (text.ok()) {
-      worker->Give(*index, job, *text);
+      worker->Give(*std::move(attempt), *text);
       return;
     }
     Outcome outcome;
     outcome.message = text.error().message;
-    Finish(work, *index, outcome);
+    Finish(work, *attempt, std::move(outcome));
   }
 }
 
@@ -212,18 +241,18 @@ bool WorkerPool::HandleReplies(PoolWorker* worker, Work* work) {
     // Again for each reply: the last one may have taken its time to store, and
     // what came meanwhile is not too late.
     worker->process().Exchange();
-    const std::vector<size_t> jobs = worker->jobs();
-    const Result<std::optional<Reply>> reply = worker->TakeReply();
-    if (!reply.ok()) {
-      HandleDeath(worker, work, reply.error().message);
+    Result<std::optional<PoolWorker::Answer>> answer = worker->TakeReply();
+    if (!answer.ok()) {
+      HandleDeath(worker, work, answer.error().message);
       return false;
     }
-    if (!reply->has_value()) {
+    if (!answer->has_value()) {
       break;
     }
-    Finish(work, jobs.front(), (*reply)->outcome);
-    if ((*reply)->leaving) {
-      work->ledger.GiveBack(worker->jobs());
+    const bool leaving = (*answer)->reply.leaving;
+    Judge(work, **std::move(answer));
+    if (leaving) {
+      work->queue.GiveBack(worker->TakeAttempts());
       worker->process().Finish(kLeaveGrace);
       return false;
     }
@@ -246,13 +275,7 @@ bool WorkerPool::HandleDeadline(PoolWorker* worker, Work* work) {
     return true;
   }
   worker->process().Finish(kNoGrace);
-  const std::vector<size_t> jobs = worker->jobs();
-  work->ledger.GiveBack(std::span(jobs).subspan(1));
-  Outcome outcome;
-  outcome.ending = Ending::kTimedOut;
-  outcome.message =
-      fmt::format("killed after {:g} s", worker->oldest_time_limit_s());
-  Finish(work, jobs.front(), outcome);
+  HandleLoss(worker, work, Mishap::kSilent, "");
   return false;
 }
 
@@ -260,29 +283,60 @@ bool WorkerPool::HandleDeadline(PoolWorker* worker, Work* work) {
 void WorkerPool::HandleDeath(PoolWorker* worker,
                              Work* work,
                              const std::string& babble) {
-  const std::string end =
+  const ProcessEnd end =
       worker->process().Finish(babble.empty() ? kDeathGrace : kNoGrace);
-  const std::vector<size_t> jobs = worker->jobs();
-  if (jobs.empty()) {
-    return;
+  if (!babble.empty()) {
+    HandleLoss(worker, work, Mishap::kCrashed, "sent rubbish: " + babble);
+  } else {
+    HandleLoss(worker,
+               work,
+               end.taken_away ? Mishap::kTakenAway : Mishap::kCrashed,
+               end.words);
   }
-  work->ledger.GiveBack(std::span(jobs).subspan(1));
-  if (!work->ledger.Blame(jobs.front())) {
-    return;
-  }
-  Outcome outcome;
-  outcome.ending = Ending::kCrashed;
-  outcome.message =
-      fmt::format("lost {} worker{}; the last {}",
-                  options_.kills_before_aside,
-                  options_.kills_before_aside == 1 ? "" : "s",
-                  babble.empty() ? end : "sent rubbish: " + babble);
-  Finish(work, jobs.front(), outcome);
 }
 
-void WorkerPool::Finish(Work* work, size_t job, const Outcome& outcome) {
-  work->ledger.MarkEnded();
-  work->on_outcome(work->jobs[job], outcome);
+void WorkerPool::HandleLoss(PoolWorker* worker,
+                            Work* work,
+                            Mishap mishap,
+                            std::string_view how) {
+  std::vector<Attempt> attempts = worker->TakeAttempts();
+  if (attempts.empty()) {
+    return;
+  }
+  const Attempt blamed = std::move(attempts.front());
+  attempts.erase(attempts.begin());
+  work->queue.GiveBack(std::move(attempts));
+  if (auto next = NextAttempt(blamed, mishap, options_.kills_before_aside)) {
+    work->queue.Retry(*std::move(next));
+    return;
+  }
+  const bool silent = mishap == Mishap::kSilent;
+  const int lost = blamed.losses + 1;
+  Outcome outcome;
+  outcome.ending = silent ? Ending::kTimedOut : Ending::kCrashed;
+  outcome.message = fmt::format(
+      "lost {} worker{}; the last {}",
+      lost,
+      lost == 1 ? "" : "s",
+      silent ? fmt::format("was silent for {:g} s", TimeLimitOf(blamed)) : how);
+  Finish(work, blamed, std::move(outcome));
+}
+
+void WorkerPool::Judge(Work* work, PoolWorker::Answer answer) {
+  if (!answer.reply.outcome.measured()) {
+    if (auto next = NextAttempt(
+            answer.attempt, Mishap::kRefused, options_.kills_before_aside)) {
+      work->queue.Retry(*std::move(next));
+      return;
+    }
+  }
+  Finish(work, answer.attempt, std::move(answer.reply.outcome));
+}
+
+void WorkerPool::Finish(Work* work, const Attempt& attempt, Outcome outcome) {
+  outcome.rung = static_cast<int>(attempt.rung);
+  const Status now = work->on_outcome(attempt.job, outcome);
+  work->status = work->status.ok() ? now : work->status;
 }
 
 }  // namespace gatedyno

@@ -1,5 +1,8 @@
 #include "harness/sim/worker_process.h"
 
+#include <algorithm>
+#include <array>
+#include <csignal>
 #include <cstring>
 #include <system_error>
 #include <thread>
@@ -58,6 +61,15 @@ std::string DescribeEnd(int wait_status) {
   const char* name = ::sigabbrev_np(signal);
   return name != nullptr ? fmt::format("was killed by SIG{}", name)
                          : fmt::format("was killed by signal {}", signal);
+}
+
+bool IsTakenAway(int wait_status) {
+  constexpr std::array<int, 4> kFromOutside = {
+      SIGKILL, SIGTERM, SIGINT, SIGHUP};
+  return WIFSIGNALED(wait_status) &&
+         std::find(kFromOutside.begin(),
+                   kFromOutside.end(),
+                   WTERMSIG(wait_status)) != kFromOutside.end();
 }
 
 // The end of `text` as one line.
@@ -181,7 +193,7 @@ Result<std::optional<std::string>> WorkerProcess::Receive() {
   return next;
 }
 
-std::string WorkerProcess::Finish(std::chrono::milliseconds grace) {
+ProcessEnd WorkerProcess::Finish(std::chrono::milliseconds grace) {
   using Clock = std::chrono::steady_clock;
   constexpr std::chrono::milliseconds kPause(1);
   CloseInput();
@@ -197,9 +209,13 @@ std::string WorkerProcess::Finish(std::chrono::milliseconds grace) {
     std::this_thread::sleep_for(kPause);
   }
   ReadComplaints();
-  std::string end = DescribeEnd(child_->process.native_exit_code());
-  const std::string complaint = OneLine(complaint_tail_);
-  return complaint.empty() ? end : fmt::format("{}: {}", end, complaint);
+  const int wait_status = child_->process.native_exit_code();
+  ProcessEnd end{DescribeEnd(wait_status), IsTakenAway(wait_status)};
+  if (const std::string complaint = OneLine(complaint_tail_);
+      !complaint.empty()) {
+    end.words += ": " + complaint;
+  }
+  return end;
 }
 
 pid_t WorkerProcess::pid() const {

@@ -23,6 +23,15 @@
 
 namespace gatedyno {
 
+struct ProcessEnd {
+  // "left with exit code 3", "was killed by SIGSEGV", followed by the end of
+  // what it wrote to its standard error.
+  std::string words;
+  // By a signal that a program does not send itself: an operator, the system
+  // short of memory, a batch system.
+  bool taken_away = false;
+};
+
 class WorkerProcess {
  public:
   // Fails, naming the program, when it cannot be executed.  The worker is told
@@ -57,10 +66,8 @@ class WorkerProcess {
   // Tells the worker that there is no more work.
   void CloseInput() { input_.Close(); }
 
-  // Waits `grace` for the worker to leave, then kills it.  Says how it ended:
-  // "left with exit code 3", "was killed by SIGSEGV", followed by the end of
-  // what it wrote to its standard error.
-  std::string Finish(std::chrono::milliseconds grace);
+  // Waits `grace` for the worker to leave, then kills it.
+  ProcessEnd Finish(std::chrono::milliseconds grace);
 
   pid_t pid() const;
 

@@ -7,6 +7,7 @@
 #include <string>
 
 #include "harness/base/result.h"
+#include "harness/store/store_trouble.h"
 
 namespace SQLite {  // NOLINT(readability-identifier-naming)
 class Exception;
@@ -14,10 +15,18 @@ class Exception;
 
 namespace gatedyno {
 
-// "runs.db: database is locked (waited 5 s)".
-Error DescribeFailure(const std::string& file,
-                      const SQLite::Exception& thrown,
-                      std::chrono::milliseconds waited);
+struct StoreFailure {
+  Error error;
+  StoreTrouble trouble = StoreTrouble::kOther;
+};
+
+// "runs.db: database is locked (waited 5 s)".  `system_error` is the errno
+// behind it, 0 where there is none: SQLite itself calls only a full disk full,
+// not a quota or a limit on file sizes.
+StoreFailure DescribeFailure(const std::string& file,
+                             const SQLite::Exception& thrown,
+                             std::chrono::milliseconds waited,
+                             int system_error = 0);
 
 }  // namespace gatedyno
 

@@ -3,6 +3,7 @@
 #include <nlohmann/json.hpp>
 
 #include "harness/record/job_json.h"
+#include "harness/record/run_progress_json.h"
 
 namespace gatedyno {
 namespace {
@@ -46,6 +47,14 @@ std::string OutcomeToText(const Outcome& outcome) {
 
 Result<Outcome> OutcomeFromText(const std::string& text) {
   return OutcomeFromJson(FromText(text));
+}
+
+std::string ProgressToText(const RunProgress& progress) {
+  return ToText(RunProgressToJson(progress));
+}
+
+Result<RunProgress> ProgressFromText(const std::string& text) {
+  return RunProgressFromJson(FromText(text));
 }
 
 }  // namespace gatedyno

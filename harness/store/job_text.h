@@ -1,4 +1,4 @@
-// Jobs and outcomes as the store's text columns.
+// Jobs, outcomes and progress as the store's text columns.
 
 #ifndef GATEDYNO_STORE_JOB_TEXT_H_
 #define GATEDYNO_STORE_JOB_TEXT_H_
@@ -8,6 +8,7 @@
 #include "harness/base/result.h"
 #include "harness/record/job.h"
 #include "harness/record/outcome.h"
+#include "harness/record/run_progress.h"
 
 namespace gatedyno {
 
@@ -19,6 +20,9 @@ Result<Job> JobFromText(const Job& named, const std::string& measures);
 // Bytes of the message that are not UTF-8 are replaced.
 std::string OutcomeToText(const Outcome& outcome);
 Result<Outcome> OutcomeFromText(const std::string& text);
+
+std::string ProgressToText(const RunProgress& progress);
+Result<RunProgress> ProgressFromText(const std::string& text);
 
 }  // namespace gatedyno
 

@@ -5,6 +5,7 @@
 #ifndef GATEDYNO_STORE_REP_H_
 #define GATEDYNO_STORE_REP_H_
 
+#include <cerrno>
 #include <chrono>
 #include <string>
 #include <utility>
@@ -18,25 +19,17 @@
 
 namespace gatedyno {
 
-// The upserts end in DO NOTHING or keep what was measured: see the header.
-inline constexpr char kInsertJobSql[] =
-    "INSERT INTO job (key, label, deck, measures) VALUES (?1, ?2, ?3, ?4) "
-    "ON CONFLICT (key) DO NOTHING";
-inline constexpr char kSaveOutcomeSql[] =
-    "INSERT INTO outcome (job_id, ending, outcome, ended_ms) "
-    "SELECT job_id, ?2, ?3, ?4 FROM job WHERE key = ?1 "
-    "ON CONFLICT (job_id) DO UPDATE SET ending = excluded.ending, "
+// What was measured stays: see the header.
+inline constexpr char kSaveSql[] =
+    "INSERT INTO job (key, label, ending, outcome, ended_ms, deck, measures) "
+    "VALUES (?1, ?2, ?3, ?4, ?5, ?6, ?7) "
+    "ON CONFLICT (key) DO UPDATE SET ending = excluded.ending, "
     "outcome = excluded.outcome, ended_ms = excluded.ended_ms "
-    "WHERE outcome.ending <> 'measured'";
+    "WHERE ending IS NOT 'measured'";
 inline constexpr char kFindMeasuredSql[] =
-    "SELECT outcome FROM outcome JOIN job USING (job_id) "
-    "WHERE key = ?1 AND ending = 'measured'";
+    "SELECT outcome FROM job WHERE key = ?1 AND ending = 'measured'";
 inline constexpr char kFindJobSql[] =
-    "SELECT label, deck, measures, outcome, ended_ms "
-    "FROM job LEFT JOIN outcome USING (job_id) WHERE key = ?1";
-inline constexpr char kAddRunJobSql[] =
-    "INSERT INTO run_job (run_id, job_id) "
-    "SELECT ?1, job_id FROM job WHERE key = ?2 ON CONFLICT DO NOTHING";
+    "SELECT label, deck, measures, outcome, ended_ms FROM job WHERE key = ?1";
 
 inline UnixMilliseconds Now() {
   const auto since_1970 = std::chrono::system_clock::now().time_since_epoch();
@@ -73,19 +66,23 @@ struct Store::Rep {
       : database(std::move(opened)),
         file(std::move(name)),
         busy_timeout(wait),
-        insert_job(database, kInsertJobSql),
-        save_outcome(database, kSaveOutcomeSql),
+        save(database, kSaveSql),
         find_measured(database, kFindMeasuredSql),
-        find_job(database, kFindJobSql),
-        add_run_job(database, kAddRunJobSql) {}
+        find_job(database, kFindJobSql) {}
 
   // Runs `work`, which returns a Result and may throw SQLite's exceptions.
   template <class Work>
   auto Guarded(Work work) -> decltype(work()) {
+    errno = 0;
     try {
-      return work();
+      auto result = work();
+      trouble = result.ok() ? trouble : StoreTrouble::kOther;
+      return result;
     } catch (const SQLite::Exception& thrown) {
-      return tl::unexpected<Error>(DescribeFailure(file, thrown, busy_timeout));
+      // Not sqlite3_system_errno(): it does not know why a commit failed.
+      StoreFailure failure = DescribeFailure(file, thrown, busy_timeout, errno);
+      trouble = failure.trouble;
+      return tl::unexpected<Error>(std::move(failure.error));
     }
   }
 
@@ -103,25 +100,24 @@ struct Store::Rep {
     });
   }
 
-  void InsertJob(const Job& job) {
+  void Save(const Job& job, const Outcome& outcome) {
+    const std::string ending(EndingName(outcome.ending));
+    const std::string outcome_text = OutcomeToText(outcome);
     const std::string measures = MeasuresToText(job);
-    InUse statement(insert_job);
+    InUse statement(save);
     statement->bindNoCopy(1, job.key);
     statement->bindNoCopy(2, job.label);
-    statement->bindNoCopy(3, job.deck);
-    statement->bindNoCopy(4, measures);
+    statement->bindNoCopy(3, ending);
+    statement->bindNoCopy(4, outcome_text);
+    statement->bind(5, Now());
+    statement->bindNoCopy(6, job.deck);
+    statement->bindNoCopy(7, measures);
     statement->exec();
   }
 
   // What a row says is ours to get right; the message still names the file.
   tl::unexpected<Error> Unreadable(const std::string& key, const Error& error) {
     return Internal(fmt::format("{}: job {}: {}", file, key, error.message));
-  }
-
-  bool HasRun(RunId run) {
-    SQLite::Statement statement(database, "SELECT 1 FROM run WHERE run_id = ?");
-    statement.bind(1, run);
-    return statement.executeStep();
   }
 
   tl::unexpected<Error> NoSuchRun(RunId run) {
@@ -131,11 +127,10 @@ struct Store::Rep {
   SQLite::Database database;
   std::string file;
   std::chrono::milliseconds busy_timeout;
-  SQLite::Statement insert_job;
-  SQLite::Statement save_outcome;
+  SQLite::Statement save;
   SQLite::Statement find_measured;
   SQLite::Statement find_job;
-  SQLite::Statement add_run_job;
+  StoreTrouble trouble = StoreTrouble::kOther;
 };
 
 }  // namespace gatedyno

@@ -49,6 +49,50 @@ constexpr Migration kMigrations[] = {
         PRIMARY KEY (run_id, job_id)
       ) STRICT, WITHOUT ROWID;
     )sql"},
+    {2, R"sql(
+      -- One row a distinct job and how it ended last, so that keeping both
+      -- writes to one place.  `outcome` is the whole outcome as JSON, all three
+      -- NULL of a job that has not ended; `measures` is the job without key,
+      -- label and deck, as JSON.  What is asked for most comes before the deck,
+      -- which spills over into pages of its own.
+      ALTER TABLE job RENAME TO job_1;
+      CREATE TABLE job (
+        job_id INTEGER PRIMARY KEY,
+        key TEXT NOT NULL UNIQUE,
+        label TEXT NOT NULL,
+        ending TEXT,
+        outcome TEXT,
+        ended_ms INTEGER,
+        deck TEXT NOT NULL,
+        measures TEXT NOT NULL
+      ) STRICT;
+      -- Jobs had one set of simulator settings, in the deck.
+      INSERT INTO job
+        SELECT job_id, key, label, ending,
+               iif(json_valid(outcome),
+                   json_insert(outcome, '$.rung', 0), outcome),
+               ended_ms, deck,
+               iif(json_valid(measures),
+                   json_insert(measures, '$.settings', json('[]')), measures)
+        FROM job_1 LEFT JOIN outcome USING (job_id);
+      -- A run's rows name their jobs themselves.
+      DROP TABLE run_job;
+      DROP TABLE outcome;
+      DROP TABLE job_1;
+      -- `head` is what a run gave but for its rows; all of it in the runs
+      -- finished before.
+      ALTER TABLE run RENAME COLUMN results TO head;
+      CREATE TABLE run_row (
+        run_id INTEGER NOT NULL REFERENCES run,
+        position INTEGER NOT NULL,
+        row TEXT NOT NULL,
+        PRIMARY KEY (run_id, position)
+      ) STRICT, WITHOUT ROWID;
+      -- The newest session; `progress` is the progress last noted as JSON.
+      ALTER TABLE run ADD COLUMN session_ms INTEGER;
+      ALTER TABLE run ADD COLUMN progress TEXT;
+      ALTER TABLE run ADD COLUMN progressed_ms INTEGER;
+    )sql"},
 };
 
 int ReadNumber(SQLite::Database& database, const char* query) {
@@ -113,6 +157,25 @@ Status PrepareSchema(SQLite::Database& database, const std::string& file) {
     return Forward(version);
   }
   return *version == NewestSchema() ? Ok() : Migrate(database, file);
+}
+
+Status CheckSchema(SQLite::Database& database, const std::string& file) {
+  const Result<int> version = LookAtVersion(database, file);
+  if (!version.ok()) {
+    return Forward(version);
+  }
+  if (*version == 0) {
+    return BadInput(fmt::format("{}: not a gatedyno store", file));
+  }
+  if (*version < NewestSchema()) {
+    return BadInput(fmt::format(
+        "{0}: written by an older gatedyno (schema {1}, this program reads "
+        "{2}); 'gatedyno run' with '--store {0}' brings it up to date",
+        file,
+        *version,
+        NewestSchema()));
+  }
+  return Ok();
 }
 
 }  // namespace gatedyno

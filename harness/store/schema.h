@@ -30,6 +30,9 @@ int NewestSchema();
 // the database itself refuses.
 Status PrepareSchema(SQLite::Database& database, const std::string& file);
 
+// For a file that may not be written: refuses an older one as well.
+Status CheckSchema(SQLite::Database& database, const std::string& file);
+
 }  // namespace gatedyno
 
 #endif  // GATEDYNO_STORE_SCHEMA_H_

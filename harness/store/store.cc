@@ -1,34 +1,25 @@
 #include "harness/store/store.h"
 
-#include <chrono>
 #include <cmath>
-#include <system_error>
-#include <thread>
+#include <cstdint>
 #include <utility>
 
 #include <SQLiteCpp/SQLiteCpp.h>
 #include <fmt/format.h>
-#include <sqlite3.h>
 
 #include "harness/store/failure.h"
 #include "harness/store/job_text.h"
+#include "harness/store/open_database.h"
 #include "harness/store/rep.h"
-#include "harness/store/schema.h"
 
 namespace gatedyno {
 namespace {
 
-// The write-ahead log lets others read during a write.  SQLite does not wait
-// where two processes turn a new file to it at once, so this does.
-void UseLog(SQLite::Database& database, std::chrono::milliseconds wait) {
-  constexpr std::chrono::milliseconds kPause(5);
-  const auto deadline = std::chrono::steady_clock::now() + wait;
-  while (database.tryExec("PRAGMA journal_mode = WAL") == SQLITE_BUSY &&
-         std::chrono::steady_clock::now() < deadline) {
-    std::this_thread::sleep_for(kPause);
-  }
-  database.exec("PRAGMA journal_mode = WAL");
-}
+// A range, which the index of the keys answers; no key goes on with the last
+// code point there is.
+constexpr char kKeysLikeSql[] =
+    "SELECT key FROM job WHERE key >= ?1 AND key < ?1 || char(1114111) "
+    "ORDER BY key LIMIT ?2";
 
 Status CheckFinite(const Job& job, const Outcome& outcome) {
   for (const auto& [name, value_s] : outcome.values_s) {
@@ -49,44 +40,40 @@ Store::~Store() = default;
 
 Result<Store> Store::Open(const std::filesystem::path& path,
                           const StoreOptions& options) {
-  const std::string file = path.string();
-  std::error_code ignored;
-  if (!options.create && !std::filesystem::exists(path, ignored)) {
-    return BadInput(fmt::format("{}: no such store", file));
+  Result<SQLite::Database> database = OpenDatabase(path, options);
+  if (!database.ok()) {
+    return Forward(database);
   }
+  const std::string file = path.string();
   try {
-    const int flags =
-        SQLite::OPEN_READWRITE | (options.create ? SQLite::OPEN_CREATE : 0);
-    SQLite::Database database(
-        file, flags, static_cast<int>(options.busy_timeout.count()));
-    if (const Status ready = PrepareSchema(database, file); !ready.ok()) {
-      return Forward(ready);
-    }
-    // NORMAL waits for the disk when the log is cleared, not after every
-    // transaction.
-    UseLog(database, options.busy_timeout);
-    database.exec("PRAGMA synchronous = NORMAL");
-    database.exec("PRAGMA foreign_keys = ON");
-    return Store(
-        std::make_unique<Rep>(std::move(database), file, options.busy_timeout));
+    return Store(std::make_unique<Rep>(
+        *std::move(database), file, options.busy_timeout));
   } catch (const SQLite::Exception& thrown) {
     return tl::unexpected<Error>(
-        DescribeFailure(file, thrown, options.busy_timeout));
+        DescribeFailure(file, thrown, options.busy_timeout).error);
   }
 }
 
 Status Store::SaveOutcome(const Job& job, const Outcome& outcome) {
-  if (Status finite = CheckFinite(job, outcome); !finite.ok()) {
+  // One statement is a transaction of its own.
+  return rep_->Guarded([&]() -> Status {
+    Status finite = CheckFinite(job, outcome);
+    if (finite.ok()) {
+      rep_->Save(job, outcome);
+    }
     return finite;
-  }
+  });
+}
+
+Status Store::SaveOutcomes(std::span<const StoredOutcome> ended) {
   return rep_->InTransaction([&]() -> Status {
-    rep_->InsertJob(job);
-    InUse statement(rep_->save_outcome);
-    statement->bindNoCopy(1, job.key);
-    statement->bind(2, std::string(EndingName(outcome.ending)));
-    statement->bind(3, OutcomeToText(outcome));
-    statement->bind(4, Now());
-    statement->exec();
+    for (const auto& [job, outcome] : ended) {
+      Status finite = CheckFinite(job, outcome);
+      if (!finite.ok()) {
+        return finite;
+      }
+      rep_->Save(job, outcome);
+    }
     return Ok();
   });
 }
@@ -133,6 +120,24 @@ Result<std::optional<StoredJob>> Store::FindJob(const std::string& key) {
     }
     return stored;
   });
+}
+
+Result<std::vector<std::string>> Store::KeysLike(const std::string& prefix,
+                                                 size_t limit) {
+  return rep_->Guarded([&]() -> Result<std::vector<std::string>> {
+    SQLite::Statement statement(rep_->database, kKeysLikeSql);
+    statement.bindNoCopy(1, prefix);
+    statement.bind(2, static_cast<std::int64_t>(limit));
+    std::vector<std::string> keys;
+    while (statement.executeStep()) {
+      keys.push_back(statement.getColumn(0).getString());
+    }
+    return keys;
+  });
+}
+
+StoreTrouble Store::trouble() const {
+  return rep_->trouble;
 }
 
 }  // namespace gatedyno

@@ -75,7 +75,7 @@ Outcome Measure(const Job& job, const std::vector<Waveform>& waveforms) {
 
 Outcome RunJob(const Job& job, Session* session) {
   const Result<std::vector<Waveform>> waveforms =
-      session->Run(job.deck, NetsOf(job), job.stop_s);
+      session->Run(DeckText(job, 0), NetsOf(job), job.stop_s);
   Outcome outcome = waveforms.ok() ? Measure(job, *waveforms)
                                    : Failed(waveforms.error().message);
   outcome.simulator_s = session->last_run_s();

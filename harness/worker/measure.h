@@ -22,6 +22,7 @@ std::set<std::string> NetsOf(const Job& job);
 // REQUIRES: a waveform for each of NetsOf(job).
 Outcome Measure(const Job& job, const std::vector<Waveform>& waveforms);
 
+// At the job's first rung.
 // REQUIRES: session->usable().
 Outcome RunJob(const Job& job, Session* session);
 

@@ -18,11 +18,49 @@ bool Passes(const Waveform& waveform, size_t i, const Crossing& crossing) {
              : before_v > crossing.level_v && after_v <= crossing.level_v;
 }
 
+double Chord(const Waveform& waveform, size_t i) {
+  return (waveform.voltage_v[i] - waveform.voltage_v[i - 1]) /
+         (waveform.time_s[i] - waveform.time_s[i - 1]);
+}
+
+// dv/dt at point i, of the parabola through it and both neighbours; at either
+// end of the waveform, of the straight line to the only one.
+double SlopeAt(const Waveform& waveform, size_t i) {
+  if (i == 0) {
+    return Chord(waveform, 1);
+  }
+  if (i + 1 == waveform.time_s.size()) {
+    return Chord(waveform, i);
+  }
+  const double before_s = waveform.time_s[i] - waveform.time_s[i - 1];
+  const double after_s = waveform.time_s[i + 1] - waveform.time_s[i];
+  return (Chord(waveform, i) * after_s + Chord(waveform, i + 1) * before_s) /
+         (before_s + after_s);
+}
+
+// The time in [t(i-1), t(i)] at which the cubic is at the level.
 double Interpolate(const Waveform& waveform, size_t i, double level_v) {
-  const double t0_s = waveform.time_s[i - 1];
+  const double step_s = waveform.time_s[i] - waveform.time_s[i - 1];
   const double v0_v = waveform.voltage_v[i - 1];
-  const double share = (level_v - v0_v) / (waveform.voltage_v[i] - v0_v);
-  return t0_s + share * (waveform.time_s[i] - t0_s);
+  const double rise_v = waveform.voltage_v[i] - v0_v;
+  const double bend0_v = SlopeAt(waveform, i - 1) * step_s - rise_v;
+  const double bend1_v = rise_v - SlopeAt(waveform, i) * step_s;
+  const auto voltage = [&](double share) {
+    const double rest = 1.0 - share;
+    return v0_v + share * rise_v +
+           share * rest * (rest * bend0_v + share * bend1_v);
+  };
+  // The ends lie on either side of the level, so halving cannot fail.
+  double low = 0.0;
+  double high = 1.0;
+  const bool rises = rise_v > 0.0;
+  constexpr int kHalvings = 53;  // As many as a double has binary digits.
+  for (int k = 0; k < kHalvings; ++k) {
+    const double middle = (low + high) / 2.0;
+    const bool before = (voltage(middle) < level_v) == rises;
+    (before ? low : high) = middle;
+  }
+  return waveform.time_s[i - 1] + high * step_s;
 }
 
 // To hundredths, and without the sign of a rounded-off zero.

@@ -29,6 +29,8 @@ TEST(UsageTest, HelpNamesCommandsAndExitCodes) {
   for (const char* text : {"estimate ",
                            "run ",
                            "deck ",
+                           "status ",
+                           "replay ",
                            "Exit codes: 0 all within, 1 some beyond, 2 bad "
                            "input, 3 jobs that could not be measured,"}) {
     EXPECT_THAT(help.out, HasSubstr(text));
@@ -39,7 +41,7 @@ TEST(UsageTest, HelpNamesCommandsAndExitCodes) {
 }
 
 TEST(UsageTest, EveryCommandHasHelp) {
-  for (const char* command : {"estimate", "run", "deck"}) {
+  for (const char* command : {"estimate", "run", "deck", "status", "replay"}) {
     const Ended help = Program().Run({command, "--help"});
     EXPECT_EQ(help.exit_code, 0) << command;
     EXPECT_THAT(help.out, HasSubstr("Usage: gatedyno " + std::string(command)));
@@ -59,6 +61,8 @@ TEST(UsageTest, RefusesWhatItDoesNotKnow) {
       {{"run"}, "plan-or-cells is required; see gatedyno --help"},
       {{"estimate"}, "cells is required; see gatedyno --help"},
       {{"deck", "inv"}, "--out is required; see gatedyno --help"},
+      {{"status"}, "store is required; see gatedyno --help"},
+      {{"replay"}, "key is required; see gatedyno --help"},
       {{"run", "inv", "--fast"},
        "the following argument was not expected: --fast; see gatedyno --help"},
       {{"run", "inv", "--store"},

@@ -9,7 +9,7 @@
 namespace gatedyno {
 namespace {
 
-TEST(DeckHeadTest, SaysNodeCornerAndSettings) {
+TEST(DeckHeadTest, SaysNodeAndCorner) {
   ProcessNode node = NodeP45();
   Bench bench = BenchOf(node);
   bench.corner = {.name = "slow_lo_m40",
@@ -20,7 +20,6 @@ TEST(DeckHeadTest, SaysNodeCornerAndSettings) {
   node.option_scale_m = 1e-6;
   EXPECT_EQ(DeckHead(bench),
             "* node p45, corner slow_lo_m40: slow process, 0.9 V, -40 C\n"
-            ".options reltol=0.0001 chgtol=1e-18 trtol=1 num_threads=1\n"
             ".option scale=1e-06\n"
             ".temp -40\n"
             ".param dvth=0.02\n"

@@ -39,9 +39,8 @@ ProcessNode TestNode() {
 std::string LinesOf(const Cell& cell,
                     const ProcessNode& node,
                     double copies = 1.0) {
-  return InstanceLines(
-      {.cell = &cell, .prefix = "d", .nets = {{0, "in"}}, .copies = copies},
-      node);
+  return CellWriter(cell, node)
+      .Lines({.prefix = "d", .nets = {{0, "in"}}, .copies = copies});
 }
 
 TEST(InstanceTest, JoinsSuppliesAndWellsAndPrefixesTheRest) {

@@ -16,7 +16,7 @@ namespace {
 std::string MaskedDeck(const Job& job) {
   const std::string folder =
       NodeP45().processes[0].models[0].path.parent_path().string();
-  return Masked(job.deck, folder, "MODELS");
+  return Masked(DeckText(job, 0), folder, "MODELS");
 }
 
 struct Golden {
@@ -75,13 +75,7 @@ TEST(StageJobTest, KeyFollowsAllThatDecidesTheOutcome) {
   bench.simulator = "simulator 2";
   EXPECT_NE(KeyOf(bench, test), key);
   bench = BenchOf(NodeP45());
-  bench.settings.reltol = 1e-3;
-  EXPECT_NE(KeyOf(bench, test), key);
-  bench = BenchOf(NodeP45());
-  bench.settings.chgtol_c = 1e-17;
-  EXPECT_NE(KeyOf(bench, test), key);
-  bench = BenchOf(NodeP45());
-  bench.settings.trtol = 7;
+  ++bench.rung;
   EXPECT_NE(KeyOf(bench, test), key);
   bench = BenchOf(NodeP45());
   bench.corner.temperature_c = 125;
@@ -117,6 +111,19 @@ TEST(StageJobTest, KeyIgnoresWhatTheCellIsCalled) {
     mosfet.name = "x9." + mosfet.name;
   }
   EXPECT_EQ(KeyOf(BenchOf(NodeP45()), TestOf(cell, "a", Edge::kRise, 4)), key);
+}
+
+// Far above what a deck takes, and none of its outcome's business.
+TEST(StageJobTest, TimeLimitFollowsTheDevicesOrTheBench) {
+  const Cell cell = BuiltInCell("nand2", NodeP45());
+  const StageTest test = TestOf(cell, "a", Edge::kRise, 4);
+  const Job estimated = StageJob(BenchOf(NodeP45()), test);
+  EXPECT_DOUBLE_EQ(estimated.time_limit_s, 30.0 + 0.2 * 5 * 4);
+  Bench bench = BenchOf(NodeP45());
+  bench.time_limit_s = 2.5;
+  const Job given = StageJob(bench, test);
+  EXPECT_EQ(given.time_limit_s, 2.5);
+  EXPECT_EQ(given.key, estimated.key);
 }
 
 TEST(StageJobTest, LabelSaysWhichJob) {

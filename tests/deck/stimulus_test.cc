@@ -48,7 +48,7 @@ TEST(StimulusTest, WritesTheSourceAndTheRun) {
   const Stimulus stimulus{.start_s = 10e-12, .ramp_s = 10e-12, .half_s = 4e-10};
   EXPECT_EQ(SourceLine(stimulus, 0.9),
             "vsrc src 0 pulse(0 0.9 1e-11 1e-11 1e-11 3.9e-10 1.6e-09)\n");
-  EXPECT_EQ(TransientLine(stimulus), ".tran 2e-11 8.1e-10 0 2e-11\n");
+  EXPECT_EQ(TransientLine(stimulus), ".tran 5e-11 8.1e-10 0 5e-11\n");
 }
 
 }  // namespace

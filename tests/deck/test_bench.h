@@ -8,6 +8,7 @@
 #include <gtest/gtest.h>
 
 #include "harness/base/install.h"
+#include "harness/deck/sim_settings.h"
 #include "harness/deck/stage_job.h"
 #include "harness/effort/estimate.h"
 #include "harness/netlist/reader.h"
@@ -37,7 +38,7 @@ inline Bench BenchOf(const ProcessNode& node) {
           .corner = node.corners.front(),
           .models_fingerprint = "models",
           .simulator = "simulator 1",
-          .settings = {}};
+          .rung = RungFor(kDefaultAccuracy)};
 }
 
 // `cell` outlives the test.

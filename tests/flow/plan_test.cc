@@ -33,7 +33,8 @@ TEST_F(PlanTest, FillsInWhatIsLeftOut) {
   EXPECT_EQ(plan->node, "p45");
   EXPECT_EQ(plan->cells, std::vector<std::string>{"inv"});
   EXPECT_TRUE(plan->corners.empty());
-  EXPECT_EQ(plan->fanouts, (std::vector<double>{1, 2, 3, 4, 6}));
+  EXPECT_TRUE(plan->fanouts.empty());
+  EXPECT_EQ(plan->accuracy, kDefaultAccuracy);
   EXPECT_EQ(plan->drive, Drive::kMatched);
   EXPECT_FALSE(plan->all_side_vectors);
   EXPECT_EQ(plan->tolerance.effort, Tolerance().effort);
@@ -48,6 +49,7 @@ json FullPlan() {
           {"cells", {"nand*", "cells/own.sp"}},
           {"corners", {"typical", "slow_*"}},
           {"fanouts", {0.5, 2, 4.5}},
+          {"accuracy", 0.0005},
           {"drive", "self"},
           {"side_vectors", "all"},
           {"tolerances", {{"effort", 0.1}, {"parasitic", 0.2}}}};
@@ -59,6 +61,7 @@ TEST_F(PlanTest, TakesEverythingGivenAndSaysItAgain) {
   EXPECT_EQ(plan->title, "gates of an interrupt arbiter");
   EXPECT_EQ(plan->corners, (std::vector<std::string>{"typical", "slow_*"}));
   EXPECT_EQ(plan->fanouts, (std::vector<double>{0.5, 2, 4.5}));
+  EXPECT_EQ(plan->accuracy, 0.0005);
   EXPECT_EQ(plan->drive, Drive::kSelf);
   EXPECT_TRUE(plan->all_side_vectors);
   EXPECT_EQ(plan->tolerance.effort, 0.1);
@@ -79,8 +82,8 @@ std::vector<Refused> RefusedPlans() {
       {"cells", nullptr, "/: key 'cells' is missing"},
       {"fanout",
        {1, 2},
-       "/: unknown key 'fanout'; known are: cells, corners, drive, fanouts, "
-       "format, node, side_vectors, title, tolerances"},
+       "/: unknown key 'fanout'; known are: accuracy, cells, corners, drive, "
+       "fanouts, format, node, side_vectors, title, tolerances"},
       {"format",
        "gatedyno-plan/9",
        R"(/format: expected the value "gatedyno-plan/1"; got )"
@@ -115,6 +118,9 @@ std::vector<Refused> RefusedPlans() {
       {"fanouts",
        {4, 4},
        "/fanouts: expected array, at least 2 of them, no two alike; got [4,4]"},
+      {"accuracy",
+       1e-6,
+       "/accuracy: expected number, at least 0.0001, at most 0.05; got 1e-06"},
       {"fanouts",
        {1, -2},
        "/fanouts/1: expected number, more than 0, at most 1000; got -2"},

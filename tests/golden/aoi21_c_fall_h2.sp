@@ -1,6 +1,6 @@
 * aoi21 c->y fall a=1 b=0, fanout 2, matched drive
+.options reltol=0.001 chgtol=1e-17 trtol=0.3 num_threads=1
 * node p45, corner typical: typical process, 1 V, 25 C
-.options reltol=0.0001 chgtol=1e-18 trtol=1 num_threads=1
 .temp 25
 .param dlen=0
 .param dvth_n=0
@@ -37,7 +37,7 @@ ml2_3 l2_n6 0 vpwr vpwr p45_p w=3.6e-07 l=4.5e-08 ad=3.6e-14 as=3.6e-14 pd=9.2e-
 ml2_4 l2_out vpwr l2_n7 0 p45_n w=1.8e-07 l=4.5e-08 ad=1.8e-14 as=6.3e-15 pd=5.6e-07 ps=2.5e-07 m=4
 ml2_5 l2_n7 0 0 0 p45_n w=1.8e-07 l=4.5e-08 ad=6.3e-15 as=1.8e-14 pd=2.5e-07 ps=5.6e-07 m=4
 ml2_6 l2_out l1_out 0 0 p45_n w=9e-08 l=4.5e-08 ad=9e-15 as=9e-15 pd=3.8e-07 ps=3.8e-07 m=4
-.tran 1.85e-11 7.433e-10 0 1.85e-11
+.tran 4.625e-11 7.433e-10 0 4.625e-11
 .include "MODELS/p45.sp"
 .meas tran delay_rise trig v(d_in) val=0.5 fall=1 targ v(d_out) val=0.5 rise=1
 .meas tran input_rise trig v(d_in) val=0.2 rise=1 targ v(d_in) val=0.8 rise=1

@@ -85,8 +85,8 @@ xp2 y a vdd vdd kit_p w=0.84 l=0.13 ad=0.26 as=0.26 pd=2.3 ps=2.3 m=0.5
 TEST_P(WrapperTest, MultiplicityInACellEqualsDevicesInParallel) {
   constexpr double kTolerance = 2e-4;  // Two runs' own, of the delay.
   TemporaryFolder folder;
-  const PreparedRun run =
-      PrepareKind(folder.Write("parallel.sp", kParallelCells));
+  PreparedRun run = PrepareKind(folder.Write("parallel.sp", kParallelCells));
+  run.plan.accuracy = kFinestAccuracy;
   const RunResult result = Lab::Shared().Measure(run);
   for (const Edge edge : {Edge::kRise, Edge::kFall}) {
     const Comparison once = FindRow(result, "once", "a", edge);

@@ -5,8 +5,8 @@
 
 #include <gtest/gtest.h>
 
+#include "harness/flow/calibrate.h"
 #include "harness/flow/characterize.h"
-#include "harness/sim/simulator_identity.h"
 
 namespace gatedyno {
 namespace {
@@ -36,21 +36,21 @@ PoolOptions Options() {
 Lab::Lab(WorkerPool pool, Store store, std::string simulator)
     : pool_(std::move(pool)),
       store_(std::move(store)),
-      simulator_(std::move(simulator)),
-      book_(&pool_,
-            &store_,
-            Must(store_.BeginRun({})),
-            [](const JobCounts& /*counts*/) {}) {}
+      simulator_(std::move(simulator)) {}
 
 Lab& Lab::Shared() {
-  static Lab& lab = *new Lab(Must(WorkerPool::Make(Options())),
-                             Must(Store::Open(":memory:")),
-                             Must(SimulatorIdentity(Worker())));
+  static Lab& lab = *[] {
+    WorkerPool pool = Must(WorkerPool::Make(Options()));
+    std::string simulator = Must(pool.Simulator());
+    return new Lab(
+        std::move(pool), Must(Store::Open(":memory:")), std::move(simulator));
+  }();
   return lab;
 }
 
 RunResult Lab::Measure(const PreparedRun& run) {
-  Result<RunResult> result = Characterize(run, simulator_, &book_);
+  WorkDesk desk(&pool_, &store_, {});
+  Result<RunResult> result = Characterize(run, simulator_, &desk);
   if (!result.ok()) {
     ADD_FAILURE() << result.error().message;
     return {};
@@ -59,16 +59,26 @@ RunResult Lab::Measure(const PreparedRun& run) {
 }
 
 std::vector<Outcome> Lab::Simulate(const std::vector<Job>& jobs) {
-  const Status finished = book_.Finish(jobs);
+  WorkDesk desk(&pool_, &store_, {});
+  std::vector<Outcome> outcomes(jobs.size());
+  for (size_t i = 0; i < jobs.size(); ++i) {
+    desk.Ask(jobs[i],
+             [&outcomes, i](const Outcome& outcome) { outcomes[i] = outcome; });
+  }
+  const Status finished = desk.Work([] { return false; });
   EXPECT_TRUE(finished.ok()) << finished.error().message;
-  std::vector<Outcome> outcomes;
-  for (const Job& job : jobs) {
-    outcomes.push_back(book_.OutcomeOf(job.key));
-    EXPECT_TRUE(outcomes.back().measured())
-        << job.label << ": " << outcomes.back().message << "\n"
-        << job.deck;
+  for (size_t i = 0; i < jobs.size(); ++i) {
+    EXPECT_TRUE(outcomes[i].measured())
+        << jobs[i].label << ": " << outcomes[i].message << "\n"
+        << jobs[i].deck;
   }
   return outcomes;
+}
+
+Bench FirstBench(const PreparedRun& run) {
+  const Result<Benches> benches = BenchesOf(run, Lab::Shared().simulator());
+  EXPECT_TRUE(benches.ok()) << benches.error().message;
+  return benches.ok() ? benches->at(run.corners.front().name) : Bench();
 }
 
 PreparedRun Prepare(const std::string& node,

@@ -1,5 +1,5 @@
-// The whole chain for tests: workers, a store in memory, one book of outcomes,
-// so that tests of one program share calibrations and jobs.
+// The whole chain for tests: workers and a store in memory, so that tests of
+// one program share calibrations and jobs.
 
 #ifndef GATEDYNO_TESTS_MEASURED_LAB_H_
 #define GATEDYNO_TESTS_MEASURED_LAB_H_
@@ -9,8 +9,9 @@
 
 #include <gtest/gtest.h>
 
-#include "harness/flow/outcome_book.h"
+#include "harness/deck/deck_head.h"
 #include "harness/flow/prepared_run.h"
+#include "harness/flow/work_desk.h"
 #include "harness/record/run_result.h"
 #include "harness/sim/worker_pool.h"
 #include "harness/store/store.h"
@@ -36,8 +37,10 @@ class Lab {
   WorkerPool pool_;
   Store store_;
   std::string simulator_;
-  OutcomeBook book_;
 };
+
+// At the run's first corner, or a failed test and no node.
+Bench FirstBench(const PreparedRun& run);
 
 // The plan's cells at its first corner, or a failed test and no cells.
 PreparedRun Prepare(const std::string& node,

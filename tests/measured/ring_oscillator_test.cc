@@ -12,6 +12,7 @@
 #include "harness/base/text.h"
 #include "harness/deck/deck_text.h"
 #include "harness/deck/instance.h"
+#include "harness/deck/sim_settings.h"
 #include "harness/flow/calibrate.h"
 #include "tests/measured/lab.h"
 
@@ -104,13 +105,13 @@ class RingWriter {
                    const std::string& in,
                    const std::string& out,
                    double copies) const {
-    Instance instance{&cell_, prefix, {}, copies};
+    Instance instance{prefix, {}, copies};
     for (const SideInput& side : arc_.side) {
       instance.nets[PinNamed(side.pin)] = side.high ? kPowerNet : kGroundNet;
     }
     instance.nets[PinNamed(arc_.pin)] = in;
     instance.nets[PinNamed(arc_.output)] = out;
-    return InstanceLines(instance, run_.node);
+    return CellWriter(cell_, run_.node).Lines(instance);
   }
 
   const PreparedRun& run_;
@@ -126,9 +127,7 @@ Job RingJob(const PreparedRun& run,
             double period_s) {
   constexpr double kPeriods = 6;
   constexpr double kStepsPerPeriod = 50;
-  const Result<Bench> bench =
-      BenchAt(run, run.corners.front(), Lab::Shared().simulator());
-  EXPECT_TRUE(bench.ok()) << bench.error().message;
+  const Bench bench = FirstBench(run);
   const double supply_v = run.corners.front().supply_v;
   const std::string step = DeckNumber(period_s / kStepsPerPeriod);
   Job job;
@@ -139,10 +138,11 @@ Job RingJob(const PreparedRun& run,
                     {"w0", supply_v / 2, Edge::kRise, 4}}};
   job.swings = {{"w0", 0.05 * supply_v, 0.95 * supply_v}};
   job.deck =
-      "* ring oscillator\n" + DeckHead(*bench) +
+      "* ring oscillator\n" + DeckHead(bench) +
       RingWriter(run, arc, ring).Circuit() + ".ic v(w0)=0\n" +
       fmt::format(".tran {0} {1} 0 {0}\n", step, DeckNumber(job.stop_s)) +
-      ModelLines(*bench) + ".end\n";
+      ModelLines(bench) + ".end\n";
+  job.settings = SettingsLadder(bench.rung);
   job.key = Fingerprint(job.deck);
   return job;
 }

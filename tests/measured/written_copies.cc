@@ -10,18 +10,15 @@
 #include "harness/base/text.h"
 #include "harness/deck/deck_text.h"
 #include "harness/deck/instance.h"
+#include "harness/deck/sim_settings.h"
 #include "harness/deck/stage_job.h"
 #include "harness/deck/stage_measures.h"
-#include "harness/flow/calibrate.h"
 #include "tests/measured/lab.h"
 
 namespace gatedyno {
 namespace {
 
 constexpr int kFanout = 4;
-// A hundredth of the usual: what the two decks may differ by is the copies,
-// not where the simulator put its time points.
-constexpr double kReltol = 1e-6;
 // Sets the length of the run only.
 constexpr double kTimeUnitPerLength_s_m = 1e-4;
 
@@ -37,14 +34,14 @@ std::string OneCopy(const PreparedRun& run,
                     const std::string& in,
                     const std::string& out) {
   const Cell& cell = run.cells.front();
-  Instance instance{&cell, prefix, {}, 1.0};
+  Instance instance{prefix, {}, 1.0};
   for (const SideInput& side : arc.side) {
     instance.nets[PinNamed(cell, side.pin)] =
         side.high ? kPowerNet : kGroundNet;
   }
   instance.nets[PinNamed(cell, arc.pin)] = in;
   instance.nets[PinNamed(cell, arc.output)] = out;
-  return InstanceLines(instance, run.node);
+  return CellWriter(cell, run.node).Lines(instance);
 }
 
 std::string WrittenLoads(const PreparedRun& run, const Arc& arc) {
@@ -63,10 +60,10 @@ std::string WrittenLoads(const PreparedRun& run, const Arc& arc) {
 }  // namespace
 
 Job CountedCopies(const PreparedRun& run, const Arc& arc) {
-  Result<Bench> bench =
-      BenchAt(run, run.corners.front(), Lab::Shared().simulator());
-  EXPECT_TRUE(bench.ok()) << bench.error().message;
-  bench->settings.reltol = kReltol;
+  Bench bench = FirstBench(run);
+  // The tightest there is: what the two decks may differ by is the copies, not
+  // where the simulator put its time points.
+  bench.rung = RungFor(kFinestAccuracy) + 1;
   StageTest test;
   test.cell = &run.cells.front();
   test.arc = arc;
@@ -77,7 +74,7 @@ Job CountedCopies(const PreparedRun& run, const Arc& arc) {
   }
   test.fanout = kFanout;
   test.time_unit_s = kTimeUnitPerLength_s_m * run.node.drawn_length_m;
-  return StageJob(*bench, test);
+  return StageJob(bench, test);
 }
 
 Job WrittenCopies(const PreparedRun& run, const Arc& arc) {

@@ -22,7 +22,8 @@ Comparison Example() {
   comparison.corner = "typical";
   comparison.estimate = {2.0, 2.75, 3.0, 1.5, 0.75};
   comparison.tolerance = {0.1, 0.3};
-  comparison.points = {{1, 5.1e-12, 3e-12, 4e-12}, {4, 9.9e-12, 3e-12, 6e-12}};
+  comparison.points = {{1, 5.1e-12, 3e-12, 4e-12, "00ff"},
+                       {4, 9.9e-12, 3e-12, 6e-12, "01ff"}};
   comparison.line = Line{1.6e-12, 3.5e-12, 1e-15, 4e-15, -3e-30, 2e-15, 6};
   comparison.effort = {1.0 / 3.0, 0.01};
   comparison.effort_mean = {1.25, 0.012};
@@ -46,9 +47,9 @@ const char* const kExampleText = R"json({
                "inner_effort": 0.75},
   "tolerance": {"effort": 0.1, "parasitic": 0.3},
   "points": [{"fanout": 1.0, "delay_s": 5.1e-12, "input_transition_s": 3e-12,
-              "output_transition_s": 4e-12},
+              "output_transition_s": 4e-12, "job_key": "00ff"},
              {"fanout": 4.0, "delay_s": 9.9e-12, "input_transition_s": 3e-12,
-              "output_transition_s": 6e-12}],
+              "output_transition_s": 6e-12, "job_key": "01ff"}],
   "line": {"slope_s": 1.6e-12, "intercept_s": 3.5e-12, "slope_u_s": 1e-15,
            "intercept_u_s": 4e-15, "covariance_s2": -3e-30,
            "largest_residual_s": 2e-15, "points": 6},

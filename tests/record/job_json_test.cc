@@ -15,6 +15,7 @@ Job SomeJob() {
   job.key = "00ff";
   job.label = "nand2 a->y h=4 typical";
   job.deck = "title\n.end\n";
+  job.settings = {".options a\n", ".options b\n"};
   job.intervals = {
       {"delay", {"d_in", 0.5, Edge::kRise, 1}, {"d_y", 0.25, Edge::kFall, 2}}};
   job.swings = {{"d_y", 0.1, 0.9}};
@@ -29,6 +30,7 @@ TEST(JobJsonTest, AJobIsWrittenLikeThis) {
     "key": "00ff",
     "label": "nand2 a->y h=4 typical",
     "deck": "title\n.end\n",
+    "settings": [".options a\n", ".options b\n"],
     "intervals": [{
       "name": "delay",
       "from": {"net": "d_in", "level_v": 0.5, "edge": "rise", "occurrence": 1},
@@ -42,13 +44,7 @@ TEST(JobJsonTest, AJobComesBackAsItWas) {
   const Job job = SomeJob();
   const Result<Job> back = JobFromJson(JobToJson(job));
   ASSERT_TRUE(back.ok()) << back.error().message;
-  EXPECT_EQ(back->key, job.key);
-  EXPECT_EQ(back->label, job.label);
-  EXPECT_EQ(back->deck, job.deck);
-  EXPECT_EQ(back->intervals, job.intervals);
-  EXPECT_EQ(back->swings, job.swings);
-  EXPECT_EQ(back->stop_s, job.stop_s);
-  EXPECT_EQ(back->time_limit_s, job.time_limit_s);
+  EXPECT_EQ(*back, job);
 }
 
 TEST(JobJsonTest, OutcomesComeBackToTheLastBit) {

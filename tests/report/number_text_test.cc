@@ -43,7 +43,10 @@ TEST(NumberTextTest, PercentsSayTheirSign) {
 }
 
 TEST(NumberTextTest, UncertaintyHasTheValuesDecimals) {
-  EXPECT_EQ(WithUncertainty({1.2961, 0.0042}, 3), "1.296 ±0.004");
+  EXPECT_EQ(WithUncertainty({1.2961, 0.0042}, 3), "1.296 ±0.005");
+  EXPECT_EQ(WithUncertainty({1.2961, 0.004}, 3), "1.296 ±0.004");
+  EXPECT_EQ(WithUncertainty({0.955, 0.0004}, 2), "0.95 ±0.01");
+  EXPECT_EQ(WithUncertainty({1.0, 0.0}, 3), "1.000 ±0.000");
   EXPECT_EQ(WithUncertainty({1.7, 0.05}, 2), "1.70 ±0.05");
   EXPECT_EQ(WithUncertainty({1.7, std::nullopt}, 2), "1.70");
 }

@@ -106,10 +106,16 @@ inline RunResult SampleRun() {
                   .node_title = "predictive 45 nm bulk, high performance",
                   .drive = Drive::kMatched,
                   .fanouts = {0.5, 2, 4},
+                  .accuracy = 0.002,
                   .tolerance = {},
                   .program = "gatedyno 0.1.0",
                   .simulator = "simulator 1",
                   .started = "2024-01-02T03:04:05Z"};
+  result.accuracy = {.promised = 0.002,
+                     .delays = 8,
+                     .rms = 0.00034,
+                     .largest = 0.0012,
+                     .worst = "nand2 a->y h=2 typical"};
   const Comparison long_names = LongNamesRow();
   result.cells = {{"inv", {"y = !a"}, 1, 1, 1},
                   {"nand2", {"y = !(a & b)"}, 1, 2, 1},

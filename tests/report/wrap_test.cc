@@ -72,5 +72,25 @@ TEST(WrapTest, SurvivesBytesThatAreNoText) {
   EXPECT_FALSE(Wrap(bytes).empty());
 }
 
+TEST(WrapTest, OneLineIsCut) {
+  struct Cut {
+    const char* text;
+    size_t columns;
+    const char* line;
+  };
+  constexpr Cut kCuts[] = {
+      {"12 of 80 jobs", 100, "12 of 80 jobs"},
+      {"12 of 80 jobs", 13, "12 of 80 jobs"},
+      {"12 of 80 jobs", 5, "12 of"},
+      {"12 of 80 jobs", 0, ""},
+      {"", 5, ""},
+      {"a\nb\x1b[K", 10, "a?b?[K"},
+      {"±±±±", 3, "±±±"},
+  };
+  for (const Cut& tried : kCuts) {
+    EXPECT_EQ(OneLine(tried.text, tried.columns), tried.line);
+  }
+}
+
 }  // namespace
 }  // namespace gatedyno

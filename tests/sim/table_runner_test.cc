@@ -5,6 +5,8 @@
 
 #include <gtest/gtest.h>
 
+#include "harness/sim/job_list.h"
+
 namespace gatedyno {
 namespace {
 
@@ -16,12 +18,13 @@ Job Labelled(std::string label) {
 
 TEST(TableRunnerTest, AnswersByLabelInOrder) {
   TableRunner runner({{"a", MeasuredOutcome({{"delay", 1e-12}})}});
-  const std::vector<Job> jobs = {Labelled("a"), Labelled("b")};
+  JobList jobs({Labelled("a"), Labelled("b")});
   std::vector<Outcome> outcomes;
   ASSERT_TRUE(runner
                   .Run(jobs,
                        [&](const Job&, const Outcome& outcome) {
                          outcomes.push_back(outcome);
+                         return Ok();
                        })
                   .ok());
   ASSERT_EQ(outcomes.size(), 2U);
@@ -36,11 +39,12 @@ TEST(TableRunnerTest, AnswersFromAFunction) {
   TableRunner runner([](const Job& job) {
     return MeasuredOutcome({{job.label, 1.0}});
   });
-  const std::vector<Job> jobs = {Labelled("x")};
+  JobList jobs({Labelled("x")});
   ASSERT_TRUE(runner
                   .Run(jobs,
                        [](const Job& job, const Outcome& outcome) {
                          EXPECT_TRUE(outcome.values_s.contains(job.label));
+                         return Ok();
                        })
                   .ok());
 }

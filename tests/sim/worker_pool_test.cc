@@ -3,6 +3,7 @@
 #include <chrono>
 #include <csignal>
 #include <map>
+#include <optional>
 #include <set>
 #include <string>
 #include <vector>
@@ -13,7 +14,7 @@
 #include <sys/time.h>
 #include <unistd.h>
 
-#include "harness/sim/simulator_identity.h"
+#include "harness/sim/job_list.h"
 #include "tests/support/leftovers.h"
 #include "tests/support/temporary_folder.h"
 
@@ -66,10 +67,12 @@ class WorkerPoolTest : public testing::Test {
 
   static Outcomes Run(WorkerPool* pool, const std::vector<Job>& jobs) {
     Outcomes outcomes;
+    JobList list(jobs);
     const Status status =
-        pool->Run(jobs, [&](const Job& job, const Outcome& outcome) {
+        pool->Run(list, [&](const Job& job, const Outcome& outcome) {
           EXPECT_TRUE(outcomes.emplace(job.label, outcome).second)
               << job.label << " ended twice";
+          return Ok();
         });
     EXPECT_TRUE(status.ok()) << status.error().message;
     return outcomes;
@@ -217,9 +220,10 @@ TEST_F(WorkerPoolTest, KillsAtTheTimeLimitAndGoesOn) {
   const auto took = std::chrono::steady_clock::now() - start;
   ASSERT_EQ(outcomes.size(), 6U);
   EXPECT_EQ(outcomes.at("hangs").ending, Ending::kTimedOut);
-  EXPECT_EQ(outcomes.at("hangs").message, "killed after 0.25 s");
+  EXPECT_EQ(outcomes.at("hangs").message,
+            "lost 3 workers; the last was silent for 0.25 s");
   EXPECT_TRUE(outcomes.at("job 1").measured());
-  EXPECT_GE(took, std::chrono::milliseconds(250));
+  EXPECT_GE(took, std::chrono::milliseconds(750));
   EXPECT_LT(took, std::chrono::seconds(5));
 }
 
@@ -232,9 +236,11 @@ TEST_F(WorkerPoolTest, WaitingIsNotHeldAgainstAJob) {
   }
   Result<WorkerPool> pool = WorkerPool::Make(Options(1));
   ASSERT_TRUE(pool.ok());
-  const Status status = pool->Run(jobs, [](const Job&, const Outcome& outcome) {
+  JobList list(jobs);
+  const Status status = pool->Run(list, [](const Job&, const Outcome& outcome) {
     EXPECT_TRUE(outcome.measured()) << outcome.message;
     ::usleep(150'000);
+    return Ok();
   });
   EXPECT_TRUE(status.ok());
 }
@@ -252,27 +258,87 @@ TEST_F(WorkerPoolTest, LargeDecksDoNotBlock) {
   EXPECT_EQ(Run(Options(2), jobs).size(), 6U);
 }
 
-TEST_F(WorkerPoolTest, StopFinishesWhatIsWithWorkersAndReturns) {
-  bool stop = false;
-  PoolOptions options = Options(2);
-  options.should_stop = [&] { return stop; };
-  Result<WorkerPool> pool = WorkerPool::Make(options);
+// A job that is refused or hangs climbs the rungs of its settings, and the
+// outcome says which one it ended on.
+TEST_F(WorkerPoolTest, ARefusedJobIsTriedWithItsNextSettings) {
+  Job job = DeedJob("refuse unless careful", "climbs");
+  job.settings = {"quick\n", "slower\n", "careful\n"};
+  Job hopeless = job;
+  hopeless.label = "hopeless";
+  hopeless.settings = {"quick\n", "slower\n"};
+  const Outcomes outcomes = Run(Options(1), {job, hopeless});
+  EXPECT_TRUE(outcomes.at("climbs").measured());
+  EXPECT_EQ(outcomes.at("climbs").rung, 2);
+  EXPECT_EQ(outcomes.at("hopeless").ending, Ending::kFailed);
+  EXPECT_EQ(outcomes.at("hopeless").message, "refused with slower");
+  EXPECT_EQ(outcomes.at("hopeless").rung, 1);
+}
+
+// Whoever kills a worker must not change a result.
+TEST_F(WorkerPoolTest, AJobWhoseWorkerWasTakenAwayRunsAgainAsItWas) {
+  const std::string marker = (folder_.path() / "taken").string();
+  Job job = DeedJob("crash once", marker);
+  job.settings = {"quick\n", "careful\n"};
+  const Outcomes outcomes = Run(Options(1), {job});
+  EXPECT_TRUE(outcomes.at(marker).measured());
+  EXPECT_EQ(outcomes.at(marker).rung, 0);
+}
+
+// Offers a job for each outcome until there were `count`.
+class FollowUps : public JobSource {
+ public:
+  explicit FollowUps(int count) : left_(count) {}
+
+  std::optional<Job> Next() override {
+    if (!may_offer_ || left_ == 0) {
+      return std::nullopt;
+    }
+    may_offer_ = false;
+    return DeedJob("echo", fmt::format("job {}", left_--));
+  }
+  void OnOutcome() { may_offer_ = true; }
+
+ private:
+  bool may_offer_ = true;
+  int left_;
+};
+
+TEST_F(WorkerPoolTest, AnOutcomeMayBringMoreJobs) {
+  Result<WorkerPool> pool = WorkerPool::Make(Options(2));
   ASSERT_TRUE(pool.ok());
-  const std::vector<Job> jobs = EchoJobs(100);
+  FollowUps jobs(12);
   int ended = 0;
-  const auto count = [&](const Job&, const Outcome& outcome) {
-    EXPECT_TRUE(outcome.measured());
+  const Status status = pool->Run(jobs, [&](const Job&, const Outcome&) {
+    jobs.OnOutcome();
     ++ended;
-    stop = ended >= 5;
-  };
-  ASSERT_TRUE(pool->Run(jobs, count).ok());
-  EXPECT_GE(ended, 5);
+    return Ok();
+  });
+  EXPECT_TRUE(status.ok());
+  EXPECT_EQ(ended, 12);
+}
+
+// The store is full, say: nothing more is started, and the reason comes back.
+TEST_F(WorkerPoolTest, AnOutcomeThatCannotBeKeptEndsTheRun) {
+  Result<WorkerPool> pool = WorkerPool::Make(Options(2));
+  ASSERT_TRUE(pool.ok());
+  JobList jobs(EchoJobs(100));
+  int ended = 0;
+  const Status status = pool->Run(jobs, [&](const Job&, const Outcome&) {
+    return ++ended < 5 ? Ok() : Status(Unavailable("disk full"));
+  });
+  ASSERT_FALSE(status.ok());
+  EXPECT_EQ(status.error().message, "disk full");
   EXPECT_LE(ended, 5 + 4);  // Two workers, two jobs each.
-  // Stopped before the start: nothing is run.
-  ended = 0;
-  stop = true;
-  ASSERT_TRUE(pool->Run(jobs, count).ok());
-  EXPECT_EQ(ended, 0);
+  // And the pool is as good as new.
+  EXPECT_EQ(Run(&*pool, EchoJobs(10)).size(), 10U);
+}
+
+TEST_F(WorkerPoolTest, SaysWhichSimulatorItHas) {
+  Result<WorkerPool> pool = WorkerPool::Make(Options(2));
+  ASSERT_TRUE(pool.ok());
+  const Result<std::string> simulator = pool->Simulator();
+  ASSERT_TRUE(simulator.ok()) << simulator.error().message;
+  EXPECT_EQ(*simulator, "none");
 }
 
 struct StartRow {
@@ -299,15 +365,15 @@ TEST_F(WorkerPoolTest, FailsNamingAProgramThatNeverGetsReady) {
         options.worker_program.string() + ": " + row.message;
     Result<WorkerPool> pool = WorkerPool::Make(options);
     ASSERT_TRUE(pool.ok());
-    const Status status =
-        pool->Run(EchoJobs(3), [](const Job&, const Outcome&) {
-          ADD_FAILURE() << "an outcome without a worker";
-        });
+    JobList jobs(EchoJobs(3));
+    const Status status = pool->Run(jobs, [](const Job&, const Outcome&) {
+      ADD_FAILURE() << "an outcome without a worker";
+      return Ok();
+    });
     ASSERT_FALSE(status.ok());
     EXPECT_EQ(status.error().kind, ErrorKind::kUnavailable);
     EXPECT_EQ(status.error().message, message);
-    const Result<std::string> identity =
-        SimulatorIdentity(options.worker_program);
+    const Result<std::string> identity = pool->Simulator();
     ASSERT_FALSE(identity.ok());
     EXPECT_EQ(identity.error().message, message);
   }
@@ -318,8 +384,9 @@ TEST_F(WorkerPoolTest, FailsNamingAProgramThatDoesNotExist) {
   options.worker_program = "/nowhere/gatedyno-worker";
   Result<WorkerPool> pool = WorkerPool::Make(options);
   ASSERT_TRUE(pool.ok());
+  JobList jobs(EchoJobs(1));
   const Status status =
-      pool->Run(EchoJobs(1), [](const Job&, const Outcome&) {});
+      pool->Run(jobs, [](const Job&, const Outcome&) { return Ok(); });
   ASSERT_FALSE(status.ok());
   EXPECT_EQ(status.error().message,
             "/nowhere/gatedyno-worker: cannot be started: No such file or "

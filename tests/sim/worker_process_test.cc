@@ -63,7 +63,7 @@ TEST_F(WorkerProcessTest, PassesFramesBothWays) {
   EXPECT_EQ(Await(worker.get()), large);
   worker->CloseInput();
   EXPECT_EQ(Await(worker.get()), "(end)");
-  EXPECT_EQ(worker->Finish(kGrace), "left with exit code 0");
+  EXPECT_EQ(worker->Finish(kGrace).words, "left with exit code 0");
 }
 
 struct EndRow {
@@ -83,14 +83,14 @@ TEST_F(WorkerProcessTest, SaysHowItEnded) {
   for (const EndRow& row : rows) {
     auto worker = StartScript(row.script);
     EXPECT_EQ(Await(worker.get()), "(end)");
-    EXPECT_EQ(worker->Finish(kGrace), row.end);
-    EXPECT_EQ(worker->Finish(kGrace), row.end);
+    EXPECT_EQ(worker->Finish(kGrace).words, row.end);
+    EXPECT_EQ(worker->Finish(kGrace).words, row.end);
   }
 }
 
 TEST_F(WorkerProcessTest, KillsWhatDoesNotLeave) {
   auto worker = StartScript("exec sleep 1000");
-  EXPECT_EQ(worker->Finish(std::chrono::milliseconds(20)),
+  EXPECT_EQ(worker->Finish(std::chrono::milliseconds(20)).words,
             "was killed by SIGKILL");
 }
 
@@ -101,7 +101,7 @@ TEST_F(WorkerProcessTest, OneThatIsDroppedIsKilledAndReaped) {
 TEST_F(WorkerProcessTest, KeepsTheEndOfALongComplaint) {
   auto worker = StartScript(
       "i=0; while [ $i -lt 20000 ]; do echo line $i >&2; i=$((i+1)); done");
-  const std::string end = worker->Finish(std::chrono::seconds(20));
+  const std::string end = worker->Finish(std::chrono::seconds(20)).words;
   EXPECT_TRUE(end.starts_with("left with exit code 0: ")) << end;
   EXPECT_TRUE(end.ends_with("line 19998; line 19999")) << end;
   EXPECT_LT(end.size(), 1500U);
@@ -117,13 +117,13 @@ TEST_F(WorkerProcessTest, WritingToOneThatStoppedReadingHarmsNobody) {
   auto worker = StartScript("exec <&-; sleep 0.05; exit 4");
   worker->Send(std::string(300'000, 'x'));
   EXPECT_EQ(Await(worker.get()), "(end)");
-  EXPECT_EQ(worker->Finish(kGrace), "left with exit code 4");
+  EXPECT_EQ(worker->Finish(kGrace).words, "left with exit code 4");
 }
 
 // The descriptors a fresh worker holds, as a list.
 std::string DescriptorsOf(WorkerProcess* worker) {
   EXPECT_EQ(Await(worker), "(end)");
-  return worker->Finish(kGrace);
+  return worker->Finish(kGrace).words;
 }
 
 TEST_F(WorkerProcessTest, InheritsNothingOfAnotherWorker) {

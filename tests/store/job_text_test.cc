@@ -18,13 +18,7 @@ TEST(JobTextTest, TheMeasuresHoldAllButTheColumns) {
   named.deck = job.deck;
   const Result<Job> back = JobFromText(named, text);
   ASSERT_TRUE(back.ok());
-  EXPECT_EQ(back->key, job.key);
-  EXPECT_EQ(back->label, job.label);
-  EXPECT_EQ(back->deck, job.deck);
-  EXPECT_EQ(back->intervals, job.intervals);
-  EXPECT_EQ(back->swings, job.swings);
-  EXPECT_EQ(back->stop_s, job.stop_s);
-  EXPECT_EQ(back->time_limit_s, job.time_limit_s);
+  EXPECT_EQ(*back, job);
 }
 
 TEST(JobTextTest, AMessageThatIsNotUtf8IsKept) {
@@ -38,6 +32,7 @@ TEST(JobTextTest, WhatIsNotJsonIsAnError) {
   for (const char* text : {"", "{", "[]", "7"}) {
     EXPECT_FALSE(OutcomeFromText(text).ok()) << text;
     EXPECT_FALSE(JobFromText(Job(), text).ok()) << text;
+    EXPECT_FALSE(ProgressFromText(text).ok()) << text;
   }
 }
 

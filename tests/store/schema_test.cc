@@ -2,6 +2,7 @@
 
 #include <fstream>
 #include <string>
+#include <vector>
 
 #include <SQLiteCpp/SQLiteCpp.h>
 #include <fmt/format.h>
@@ -79,8 +80,7 @@ TEST_F(SchemaTest, AnEmptyFileIsANewStore) {
 
 // A file as version 1 wrote it must open, whatever later versions add.  Frozen:
 // a copy of the first schema, not of what the program has today.
-TEST_F(SchemaTest, OpensAFileOfTheFirstVersion) {
-  Raw().exec(R"sql(
+constexpr char kFirstVersion[] = R"sql(
     PRAGMA application_id = 1734637934;
     PRAGMA user_version = 1;
     CREATE TABLE job (job_id INTEGER PRIMARY KEY, key TEXT NOT NULL UNIQUE,
@@ -95,21 +95,99 @@ TEST_F(SchemaTest, OpensAFileOfTheFirstVersion) {
     CREATE TABLE run_job (run_id INTEGER NOT NULL REFERENCES run,
       job_id INTEGER NOT NULL REFERENCES job,
       PRIMARY KEY (run_id, job_id)) STRICT, WITHOUT ROWID;
-    INSERT INTO job VALUES (1, '00ff', 'inv a->y h=4', '.end',
-      '{"intervals": [], "swings": [], "stop_s": 1e-9, "time_limit_s": 60}');
-    INSERT INTO outcome VALUES (1, 'measured',
-      '{"ending": "measured", "values_s": {"delay": 8.3e-12}, "message": "",
-        "simulator_s": 0.01}', 1700000000000);
-    INSERT INTO run VALUES (1, '{}', 'p45', '0.1.0', '39.3', 1700000000000,
-      1700000000001, '[]');
-    INSERT INTO run_job VALUES (1, 1);
-  )sql");
-  Result<Store> store = Store::Open(Path());
-  ASSERT_TRUE(store.ok()) << store.error().message;
-  EXPECT_EQ(store->FindMeasured("00ff").value()->values_s.at("delay"), 8.3e-12);
-  EXPECT_EQ(store->FindJob("00ff").value()->job.stop_s, 1e-9);
-  EXPECT_EQ(store->RunJobKeys(1).value().size(), 1U);
-  EXPECT_EQ(store->Runs().value().at(0).started, 1700000000000);
+    INSERT INTO job VALUES
+      (1, '00ff', 'inv a->y h=4', '* inv' || char(10) || '.end',
+       '{"intervals": [{"name": "delay",
+          "from": {"net": "a", "level_v": 0.5, "edge": "rise",
+                   "occurrence": 2},
+          "to": {"net": "y", "level_v": 0.5, "edge": "fall",
+                 "occurrence": 1}}],
+         "swings": [], "stop_s": 1e-9, "time_limit_s": 60}'),
+      (2, '01ff', 'inv a->y h=6', '.end',
+       '{"intervals": [], "swings": [], "stop_s": 2e-9, "time_limit_s": 60}'),
+      (3, '02ff', 'inv a->y h=8', '.end',
+       '{"intervals": [], "swings": [], "stop_s": 3e-9, "time_limit_s": 60}'),
+      (4, '03ff', 'inv a->y h=9', '.end', 'no JSON');
+    INSERT INTO outcome VALUES
+      (1, 'measured',
+       '{"ending": "measured", "values_s": {"delay": 3.3333333333333335e-12},
+         "message": "", "simulator_s": 0.01}', 1700000000000),
+      (2, 'crashed',
+       '{"ending": "crashed", "values_s": {}, "message": "signal \"11\"",
+         "simulator_s": 0.0}', 1700000000002);
+    INSERT INTO run VALUES
+      (1, '{"title": "arbiter"}', 'p45', '0.1.0', '39.3', 1700000000000,
+       1700000000001, '{"comparisons": [1, 2]}'),
+      (3, '{}', 'p65', '0.1.0', '39.3', 1700000000005, NULL, NULL);
+    INSERT INTO run_job VALUES (1, 1), (1, 2), (3, 3);
+)sql";
+
+class FirstVersionTest : public SchemaTest {
+ protected:
+  Store Opened() {
+    Raw().exec(kFirstVersion);
+    return Store::Open(Path()).value();
+  }
+};
+
+TEST_F(FirstVersionTest, HasItsJobs) {
+  Store store = Opened();
+  EXPECT_EQ(Raw().execAndGet("PRAGMA user_version").getInt(), NewestSchema());
+  const StoredJob first = store.FindJob("00ff").value().value();
+  EXPECT_EQ(first.job.label, "inv a->y h=4");
+  EXPECT_EQ(first.job.deck, "* inv\n.end");
+  EXPECT_EQ(DeckText(first.job, 0), first.job.deck);
+  EXPECT_TRUE(first.job.settings.empty());
+  ASSERT_EQ(first.job.intervals.size(), 1U);
+  EXPECT_EQ(first.job.intervals[0].from.occurrence, 2);
+  EXPECT_EQ(first.job.stop_s, 1e-9);
+  EXPECT_EQ(first.job.time_limit_s, 60.0);
+  EXPECT_EQ(store.FindJob("01ff").value()->job.stop_s, 2e-9);
+  EXPECT_EQ(store.FindJob("02ff").value()->job.stop_s, 3e-9);
+  // What was not sound before is so still, and no reason to refuse the rest.
+  EXPECT_FALSE(store.FindJob("03ff").ok());
+}
+
+TEST_F(FirstVersionTest, HasItsOutcomes) {
+  Store store = Opened();
+  const Outcome measured = store.FindMeasured("00ff").value().value();
+  EXPECT_EQ(measured.values_s.at("delay"), 3.3333333333333335e-12);
+  EXPECT_EQ(measured.simulator_s, 0.01);
+  EXPECT_EQ(measured.rung, 0);
+  const StoredJob crashed = store.FindJob("01ff").value().value();
+  EXPECT_EQ(crashed.outcome->ending, Ending::kCrashed);
+  EXPECT_EQ(crashed.outcome->message, "signal \"11\"");
+  EXPECT_EQ(crashed.outcome->rung, 0);
+  EXPECT_EQ(crashed.ended, 1700000000002);
+  EXPECT_FALSE(store.FindJob("02ff").value()->outcome.has_value());
+}
+
+TEST_F(FirstVersionTest, HasItsRuns) {
+  Store store = Opened();
+  const std::vector<RunRecord> runs = store.Runs().value();
+  ASSERT_EQ(runs.size(), 2U);
+  EXPECT_EQ(runs[0].info.plan, R"({"title": "arbiter"})");
+  EXPECT_EQ(runs[0].info.node, "p45");
+  EXPECT_EQ(runs[0].started, 1700000000000);
+  EXPECT_EQ(runs[0].session_started, 1700000000000);
+  EXPECT_EQ(runs[0].finished, 1700000000001);
+  EXPECT_EQ(runs[0].progressed, 1700000000001);
+  EXPECT_FALSE(runs[0].progress.has_value());
+  const RunText text = store.RunResults(1).value().value();
+  EXPECT_EQ(text.head, R"({"comparisons": [1, 2]})");
+  EXPECT_TRUE(text.rows.empty());
+  EXPECT_EQ(runs[1].id, 3);
+  EXPECT_FALSE(runs[1].finished.has_value());
+  EXPECT_FALSE(store.RunResults(3).value().has_value());
+  // Ids go on from there.
+  EXPECT_EQ(store.BeginRun(runs[1].info).value(), 4);
+}
+
+TEST_F(FirstVersionTest, IsMigratedOnce) {
+  { const Store store = Opened(); }
+  Store store = Store::Open(Path()).value();
+  EXPECT_TRUE(store.FindMeasured("00ff").value().has_value());
+  EXPECT_EQ(store.Runs().value().size(), 2U);
 }
 
 }  // namespace

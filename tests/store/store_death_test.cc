@@ -64,7 +64,7 @@ TEST_F(StoreDeathTest, WhatWasSavedBeforeAKillIsThere) {
   SQLite::Database plain(Path().string(), SQLite::OPEN_READONLY);
   EXPECT_EQ(plain.execAndGet("PRAGMA integrity_check").getString(), "ok");
   EXPECT_EQ(plain.execAndGet("SELECT count(*) FROM job").getInt(),
-            plain.execAndGet("SELECT count(*) FROM outcome").getInt());
+            plain.execAndGet("SELECT count(outcome) FROM job").getInt());
 }
 
 }  // namespace

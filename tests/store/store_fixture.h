@@ -36,6 +36,7 @@ inline Job ExampleJob(int number) {
   job.label = "nand2 a->y h=" + std::to_string(number) + " typical";
   job.deck = "* " + job.label + "\nM1 y a 0 0 nch\n.end\n";
   job.key = Fingerprint(job.deck);
+  job.settings = {".options reltol=1e-4\n", ".options reltol=1e-5\n"};
   job.intervals = {
       {"delay", {"a", 0.5, Edge::kRise, 2}, {"y", 0.5, Edge::kFall, 1}}};
   job.swings = {{"y", 0.05, 0.95}};
@@ -48,12 +49,16 @@ inline Outcome MeasuredAs(double delay_s) {
   return {.ending = Ending::kMeasured,
           .values_s = {{"delay", delay_s}},
           .message = "",
-          .simulator_s = 0.004};
+          .simulator_s = 0.004,
+          .rung = 1};
 }
 
 inline Outcome EndedAs(Ending ending, const std::string& message) {
-  return {
-      .ending = ending, .values_s = {}, .message = message, .simulator_s = 0.0};
+  return {.ending = ending,
+          .values_s = {},
+          .message = message,
+          .simulator_s = 0.0,
+          .rung = 0};
 }
 
 }  // namespace gatedyno

@@ -60,14 +60,11 @@ TEST_F(StoreTest, KeepsTheDeckOfEveryEnding) {
               cases[i].found_as_measured);
     const auto kept = store.FindJob(job.key).value();
     ASSERT_TRUE(kept.has_value());
-    EXPECT_EQ(kept->job.label, job.label);
-    EXPECT_EQ(kept->job.deck, job.deck);
-    EXPECT_EQ(kept->job.intervals, job.intervals);
-    EXPECT_EQ(kept->job.swings, job.swings);
-    EXPECT_EQ(kept->job.time_limit_s, 30.0);
+    EXPECT_EQ(kept->job, job);
     ASSERT_TRUE(kept->outcome.has_value());
     EXPECT_EQ(kept->outcome->ending, cases[i].outcome.ending);
     EXPECT_EQ(kept->outcome->message, cases[i].outcome.message);
+    EXPECT_EQ(kept->outcome->rung, cases[i].outcome.rung);
     const auto ended =
         std::chrono::system_clock::time_point(milliseconds(kept->ended));
     EXPECT_LT(std::chrono::system_clock::now() - ended, kAMinute);
@@ -138,6 +135,7 @@ TEST_F(StoreTest, ASecondWriterWaitsAndSaysSo) {
   EXPECT_EQ(saved.error().kind, ErrorKind::kUnavailable);
   EXPECT_EQ(saved.error().message,
             Path().string() + ": database is locked (waited 0.2 s)");
+  EXPECT_EQ(store.trouble(), StoreTrouble::kLocked);
   // Reading goes on, and so does writing once the other is done.
   EXPECT_TRUE(store.FindMeasured(ExampleJob(1).key).ok());
   other.exec("COMMIT");
@@ -215,7 +213,7 @@ TEST_F(StoreTest, SaysWhichJobCannotBeRead) {
   const Job job = ExampleJob(1);
   ASSERT_TRUE(store.SaveOutcome(job, MeasuredAs(1e-12)).ok());
   SQLite::Database other(Path().string(), SQLite::OPEN_READWRITE);
-  other.exec("UPDATE outcome SET outcome = '[]'");
+  other.exec("UPDATE job SET outcome = '[]'");
   const auto found = store.FindMeasured(job.key);
   ASSERT_FALSE(found.ok());
   EXPECT_EQ(found.error().kind, ErrorKind::kInternal);
@@ -224,28 +222,71 @@ TEST_F(StoreTest, SaysWhichJobCannotBeRead) {
             0U);
 }
 
-// Overnight runs bring thousands of outcomes a second from many workers; the
-// store must not be what they wait for.  The bound is far below what a quiet
-// machine does, and tells a kept statement from one prepared each time or a
-// disk wait per transaction.
-TEST_F(StoreTest, KeepsPaceWithManyWorkers) {
-  constexpr int kOutcomes = 5000;
-  constexpr double kLimitS = 10.0;
+TEST_F(StoreTest, ABatchIsKeptAsItsOutcomesWouldBe) {
   Store store = Store::Open(Path()).value();
-  std::vector<Job> jobs;
-  for (int i = 0; i < kOutcomes; ++i) {
-    jobs.push_back(ExampleJob(i));
-    jobs.back().deck.append(4000, '*');  // The size of a small arc's deck.
+  ASSERT_TRUE(store.SaveOutcome(ExampleJob(1), MeasuredAs(1e-12)).ok());
+  ASSERT_TRUE(
+      store.SaveOutcome(ExampleJob(2), EndedAs(Ending::kCrashed, "signal 9"))
+          .ok());
+  const std::vector<StoredOutcome> merged = {
+      {ExampleJob(1), EndedAs(Ending::kTimedOut, "after 30 s")},
+      {ExampleJob(2), MeasuredAs(2e-12)},
+      {ExampleJob(3), MeasuredAs(3e-12)},
+      {ExampleJob(3), MeasuredAs(4e-12)},
+  };
+  ASSERT_TRUE(store.SaveOutcomes(merged).ok());
+  for (int i = 1; i <= 3; ++i) {
+    const auto found = store.FindMeasured(ExampleJob(i).key).value();
+    ASSERT_TRUE(found.has_value()) << i;
+    EXPECT_EQ(found->values_s.at("delay"), i * 1e-12);
   }
-  const auto start = std::chrono::steady_clock::now();
-  for (const Job& job : jobs) {
+  EXPECT_TRUE(store.SaveOutcomes({}).ok());
+}
+
+TEST_F(StoreTest, ABatchIsKeptWholeOrNotAtAll) {
+  Store store = Store::Open(Path()).value();
+  const std::vector<StoredOutcome> batch = {
+      {ExampleJob(1), MeasuredAs(1e-12)},
+      {ExampleJob(2), MeasuredAs(std::numeric_limits<double>::infinity())},
+  };
+  const Status saved = store.SaveOutcomes(batch);
+  ASSERT_FALSE(saved.ok());
+  EXPECT_EQ(saved.error().message,
+            "nand2 a->y h=2 typical: 'delay' was measured as inf");
+  EXPECT_EQ(store.trouble(), StoreTrouble::kOther);
+  EXPECT_FALSE(store.FindJob(ExampleJob(1).key).value().has_value());
+  EXPECT_TRUE(store.SaveOutcomes({batch.data(), 1}).ok());
+}
+
+TEST_F(StoreTest, KeysAreFoundByTheirBeginning) {
+  struct Case {
+    std::string prefix;
+    size_t limit;
+    std::vector<std::string> keys;
+  };
+  const Case cases[] = {
+      {"ab", 10, {"ab", "ab01", "ab02", "abff"}},
+      {"ab0", 10, {"ab01", "ab02"}},
+      {"ab01", 10, {"ab01"}},
+      {"ab", 2, {"ab", "ab01"}},
+      {"ac", 10, {"ac00"}},
+      {"ad", 10, {}},
+      {"AB", 10, {}},
+      {"a%", 10, {}},
+      {"a*", 10, {}},
+      {"", 10, {"0001", "ab", "ab01", "ab02", "abff", "ac00"}},
+      {"", 0, {}},
+  };
+  Store store = Store::Open(Path()).value();
+  for (const char* key : {"ab02", "ac00", "ab", "abff", "0001", "ab01"}) {
+    Job job = ExampleJob(1);
+    job.key = key;
     ASSERT_TRUE(store.SaveOutcome(job, MeasuredAs(1e-12)).ok());
   }
-  const std::chrono::duration<double> taken =
-      std::chrono::steady_clock::now() - start;
-  RecordProperty("outcomes_per_second",
-                 std::to_string(kOutcomes / taken.count()));
-  EXPECT_LT(taken.count(), kLimitS);
+  for (const Case& tried : cases) {
+    EXPECT_EQ(store.KeysLike(tried.prefix, tried.limit).value(), tried.keys)
+        << tried.prefix;
+  }
 }
 
 }  // namespace

@@ -7,5 +7,6 @@ if ! command -v shellcheck >/dev/null; then
   echo "skipped: shellcheck is not installed"
   exit 77
 fi
-shellcheck quickstart .ci/run tests/style/*.sh
+mapfile -t scripts < <(find tests -name '*.sh')
+shellcheck quickstart .ci/run "${scripts[@]}"
 echo "all scripts are clean"

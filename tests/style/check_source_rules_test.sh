@@ -35,7 +35,7 @@ expect() {
   fi
 }
 
-order='base record netlist network node effort deck sim worker store fit compare report flow cli'
+order='base record netlist network node effort deck sim worker store farm fit compare report flow cli'
 
 fresh_tree
 expect 0 ''

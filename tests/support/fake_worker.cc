@@ -128,6 +128,19 @@ void Doze(const Job& job) {
   Echo(job);
 }
 
+// Measures only with the settings "careful".
+void RefuseUnlessCareful(const Job& job) {
+  if (job.settings.at(0) == "careful\n") {
+    Echo(job);
+    return;
+  }
+  const std::string settings = job.settings.at(0);
+  Reply reply;
+  reply.outcome.message =
+      "refused with " + settings.substr(0, settings.find('\n'));
+  Write(EncodeFrame(ReplyText(reply)));
+}
+
 using Deed = void (*)(const Job& job);
 const std::map<std::string_view, Deed>& Deeds() {
   static const auto& deeds = *new std::map<std::string_view, Deed>{
@@ -145,6 +158,7 @@ const std::map<std::string_view, Deed>& Deeds() {
       {"reply twice", ReplyTwice},
       {"chatter", Chatter},
       {"doze", Doze},
+      {"refuse unless careful", RefuseUnlessCareful},
   };
   return deeds;
 }

@@ -165,7 +165,9 @@ TEST(ChainTest, LostMultiplicityIsFarFromCopies) {
 }
 
 TEST(ChainTest, AgreesWithTheSameDeckInBatch) {
-  constexpr double kTolerance = 1e-6;  // The batch log gives seven digits.
+  // What the batch log draws as straight lines are curves here; to all digits:
+  // tests/measured/exported_deck_test.cc.
+  constexpr double kTolerance = 1e-4;
   std::string deck = ChainDeck("", MLines);
   const auto delays = Delays(deck);
   deck.insert(deck.find(".end\n"),

@@ -8,11 +8,23 @@
 namespace gatedyno {
 namespace {
 
-// `in` rises and `out` falls 1 ns later, both in 1 ns, from 0 to 1 V.
+// `in` rises and `out` falls 1 ns later, both in 1 ns, from 0 to 1 V.  Points
+// in between make each edge straight where it is measured.
 std::vector<Waveform> Step() {
-  const std::vector<double> time_s = {0.0, 1e-9, 2e-9, 3e-9};
-  return {{"in", time_s, {0.0, 0.0, 1.0, 1.0}},
-          {"out", time_s, {1.0, 1.0, 1.0, 0.0}}};
+  const std::vector<double> time_s = {0.0,
+                                      1e-9,
+                                      1.1e-9,
+                                      1.3e-9,
+                                      1.7e-9,
+                                      1.9e-9,
+                                      2.0e-9,
+                                      2.1e-9,
+                                      2.3e-9,
+                                      2.7e-9,
+                                      2.9e-9,
+                                      3e-9};
+  return {{"in", time_s, {0.0, 0.0, 0.1, 0.3, 0.7, 0.9, 1, 1, 1, 1, 1, 1}},
+          {"out", time_s, {1, 1, 1, 1, 1, 1, 1, 0.9, 0.7, 0.3, 0.1, 0.0}}};
 }
 
 Job StepJob() {

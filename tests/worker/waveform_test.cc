@@ -1,6 +1,9 @@
 #include "harness/worker/waveform.h"
 
+#include <cmath>
+#include <numbers>
 #include <string>
+#include <vector>
 
 #include <gtest/gtest.h>
 
@@ -19,15 +22,10 @@ struct CrossingRow {
   double time_s;
 };
 
-TEST(WaveformTest, FindsCrossingsByLinearInterpolation) {
-  // Worked by hand from the five points of Bumpy().
+// At the time points themselves, whatever lies between.
+TEST(WaveformTest, CountsCrossings) {
   const CrossingRow rows[] = {
-      {0.4, Edge::kRise, 1, 0.5e-9},
-      {0.5, Edge::kFall, 1, 1.5e-9},
-      {0.6, Edge::kRise, 2, 2.5e-9},
-      {0.8, Edge::kRise, 1, 1e-9},  // At a point: counted once,
-      {0.8, Edge::kRise, 2, 2.75e-9},
-      {0.2, Edge::kFall, 1, 2e-9},  // and when it is the turning point.
+      {0.8, Edge::kRise, 1, 1e-9},  // Counted once.
       {1.0, Edge::kRise, 1, 3e-9},
   };
   constexpr double kRounding = 1e-22;
@@ -37,6 +35,57 @@ TEST(WaveformTest, FindsCrossingsByLinearInterpolation) {
     ASSERT_TRUE(time_s.ok()) << time_s.error().message;
     EXPECT_NEAR(*time_s, row.time_s, kRounding) << row.level_v;
   }
+  const Result<double> second =
+      CrossingTime(Bumpy(), {"y", 0.8, Edge::kRise, 2});
+  ASSERT_TRUE(second.ok());
+  EXPECT_GT(*second, 2e-9);
+  EXPECT_LT(*second, 3e-9);
+}
+
+// Unequal steps, as the simulator takes them.
+Waveform Sampled(double (*voltage)(double), const std::vector<double>& at_s) {
+  Waveform waveform{"y", at_s, {}};
+  for (const double t : at_s) {
+    waveform.voltage_v.push_back(voltage(t));
+  }
+  return waveform;
+}
+
+// A parabola is its own Hermite cubic, so the crossing is exact: v = t^2 is at
+// 0.5 at the root of 0.5, and a straight line between 0.6 and 0.9 says 0.693.
+TEST(WaveformTest, FollowsAParabolaExactly) {
+  const Waveform waveform =
+      Sampled([](double t) { return t * t; }, {0.0, 0.2, 0.6, 0.9, 1.0});
+  const Result<double> time_s =
+      CrossingTime(waveform, {"y", 0.5, Edge::kRise, 1});
+  ASSERT_TRUE(time_s.ok());
+  constexpr double kRounding = 1e-12;
+  EXPECT_NEAR(*time_s, std::sqrt(0.5), kRounding);
+}
+
+// v = exp(-t) is at 0.5 at ln 2.  With steps of 0.1 a straight line errs by
+// h^2/8 of the curvature, 1e-3; the cubic's error is of third order.
+TEST(WaveformTest, ErrsFarLessThanAStraightLine) {
+  std::vector<double> at_s;
+  for (int i = 0; i <= 20; ++i) {
+    at_s.push_back(0.05 + 0.1 * i);
+  }
+  const Waveform waveform =
+      Sampled([](double t) { return std::exp(-t); }, at_s);
+  const Result<double> time_s =
+      CrossingTime(waveform, {"y", 0.5, Edge::kFall, 1});
+  ASSERT_TRUE(time_s.ok());
+  constexpr double kThirdOrder = 3e-5;
+  EXPECT_NEAR(*time_s, std::numbers::ln2, kThirdOrder);
+}
+
+// Between two points there is nothing but the line.
+TEST(WaveformTest, TwoPointsAreALine) {
+  const Waveform waveform{"y", {0.0, 1e-9}, {0.0, 1.0}};
+  const Result<double> time_s =
+      CrossingTime(waveform, {"y", 0.25, Edge::kRise, 1});
+  ASSERT_TRUE(time_s.ok());
+  EXPECT_NEAR(*time_s, 0.25e-9, 1e-22);
 }
 
 struct MissingRow {

@@ -13,7 +13,7 @@
 #include <gmock/gmock.h>
 #include <gtest/gtest.h>
 
-#include "harness/sim/simulator_identity.h"
+#include "harness/sim/job_list.h"
 #include "harness/sim/worker_pool.h"
 #include "tests/support/leftovers.h"
 #include "tests/support/temporary_folder.h"
@@ -71,9 +71,11 @@ std::map<std::string, Outcome> RunAll(const PoolOptions& options,
   Result<WorkerPool> pool = WorkerPool::Make(options);
   EXPECT_TRUE(pool.ok());
   std::map<std::string, Outcome> outcomes;
+  JobList list(jobs);
   const Status status =
-      pool->Run(jobs, [&](const Job& job, const Outcome& outcome) {
+      pool->Run(list, [&](const Job& job, const Outcome& outcome) {
         outcomes[job.label] = outcome;
+        return Ok();
       });
   EXPECT_TRUE(status.ok()) << status.error().message;
   return outcomes;
@@ -87,11 +89,11 @@ TEST(WorkerProgramTest, SaysItsVersionAndTheSimulators) {
   EXPECT_THAT(line,
               MatchesRegex("gatedyno-worker [0-9.]+ \\(ngspice-.*, built "
                            ".*\\)"));
-  const Result<Hello> hello = AskWorker(Program());
-  ASSERT_TRUE(hello.ok()) << hello.error().message;
-  EXPECT_EQ(
-      line,
-      fmt::format("gatedyno-worker {} ({})", hello->worker, hello->simulator));
+  Result<WorkerPool> pool = WorkerPool::Make(Options(1));
+  ASSERT_TRUE(pool.ok()) << pool.error().message;
+  const Result<std::string> simulator = pool->Simulator();
+  ASSERT_TRUE(simulator.ok()) << simulator.error().message;
+  EXPECT_THAT(line, testing::EndsWith(" (" + *simulator + ")"));
 }
 
 TEST(WorkerProgramTest, RefusesOptionsItDoesNotHave) {
@@ -185,7 +187,8 @@ TEST(WorkerProgramTest, ALongRunIsKilledAtItsLimit) {
   job.time_limit_s = 0.5;
   const auto outcomes = RunAll(Options(1), {job, RcJob(1.0)});
   EXPECT_EQ(outcomes.at("long").ending, Ending::kTimedOut);
-  EXPECT_EQ(outcomes.at("long").message, "killed after 0.5 s");
+  EXPECT_EQ(outcomes.at("long").message,
+            "lost 3 workers; the last was silent for 0.5 s");
   EXPECT_TRUE(outcomes.at(RcJob(1.0).label).measured());
 }
 

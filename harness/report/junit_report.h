@@ -1,0 +1,19 @@
+// The run as JUnit XML, for what shows test results: one suite a corner, one
+// case an arc.  Beyond is a failure; not measured an error, since nothing was
+// found out.  Each case carries its numbers as properties, named as the
+// columns of the CSV report, with all their digits.
+
+#ifndef GATEDYNO_REPORT_JUNIT_REPORT_H_
+#define GATEDYNO_REPORT_JUNIT_REPORT_H_
+
+#include <string>
+
+#include "harness/record/run_result.h"
+
+namespace gatedyno {
+
+std::string JunitReport(const RunResult& result);
+
+}  // namespace gatedyno
+
+#endif  // GATEDYNO_REPORT_JUNIT_REPORT_H_

@@ -1,0 +1,20 @@
+// Where a run that is reported on is kept.
+
+#ifndef GATEDYNO_REPORT_RUN_SOURCE_H_
+#define GATEDYNO_REPORT_RUN_SOURCE_H_
+
+#include <string>
+
+#include "harness/store/run_record.h"
+
+namespace gatedyno {
+
+struct RunSource {
+  std::string store;  // File name without its folder.
+  RunId run = 0;
+  std::string plan;  // As run, JSON.
+};
+
+}  // namespace gatedyno
+
+#endif  // GATEDYNO_REPORT_RUN_SOURCE_H_
