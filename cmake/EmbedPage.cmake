@@ -7,15 +7,29 @@ file(WRITE ${OUTPUT} "// Made by cmake/EmbedPage.cmake.\n\n"
   "#ifdef __clang__\n"
   "#pragma clang diagnostic ignored \"-Woverlength-strings\"\n#endif\n\n"
   "namespace gatedyno {\n")
-foreach(part IN ITEMS
-    kPageShell=page.html kPageStyle=page.css kPageScript=page.js
-    kChartScript=vendor/charts.min.js kChartLicences=vendor/LICENSES.txt)
-  string(REGEX MATCH "^(.*)=(.*)$" unused ${part})
-  set(name ${CMAKE_MATCH_1})
-  file(READ ${SOURCE}/${CMAKE_MATCH_2} text)
-  file(SHA256 ${SOURCE}/${CMAKE_MATCH_2} hash)
+
+function(embed name text)
+  string(SHA256 hash "${text}")
   file(APPEND ${OUTPUT}
     "\nconst PagePart ${name} = {\n    R\"embedded(" "${text}"
     ")embedded\",\n    \"${hash}\"};\n")
+endfunction()
+
+function(embed_file name file)
+  file(READ ${SOURCE}/${file} text)
+  embed(${name} "${text}")
+endfunction()
+
+embed_file(kPageShell page.html)
+embed_file(kPageStyle page.css)
+embed_file(kChartScript vendor/charts.min.js)
+embed_file(kChartLicences vendor/LICENSES.txt)
+
+# One script of all its parts, in a scope of its own.
+set(script "(() => {\n")
+foreach(part IN ITEMS common charts differences pictures arc_table main)
+  file(READ ${SOURCE}/script/${part}.js text)
+  string(APPEND script "${text}")
 endforeach()
+embed(kPageScript "${script}})();\n")
 file(APPEND ${OUTPUT} "\n}  // namespace gatedyno\n")

@@ -14,6 +14,7 @@
 #include "harness/cli/commands.h"
 #include "harness/record/run_result_json.h"
 #include "harness/report/csv_report.h"
+#include "harness/report/json_report.h"
 #include "harness/report/junit_report.h"
 #include "harness/report/markdown_report.h"
 #include "harness/report/page.h"
@@ -37,13 +38,6 @@ struct StoredRun {
   RunResult result;
   RunSource source;
 };
-
-std::string JsonReport(const RunResult& result) {
-  constexpr int kIndent = 1;
-  return RunResultToJson(result).dump(
-             kIndent, ' ', false, nlohmann::json::error_handler_t::replace) +
-         "\n";
-}
 
 // The one asked for, or the newest that is finished.
 Result<RunRecord> ChooseRun(const std::vector<RunRecord>& runs,
@@ -129,15 +123,16 @@ Result<ExitCode> Report(const Options& options) {
       {options.markdown,
        [](const StoredRun& r) { return MarkdownReport(r.result); }},
   };
+  fmt::print("run {}: {}\n", run->source.run, VerdictSentence(run->result));
   for (const Output& output : outputs) {
     if (output.file) {
       const Status written = WriteFile(*output.file, output.text(*run));
       if (!written.ok()) {
         return Forward(written);
       }
+      fmt::print("written: {}\n", *output.file);
     }
   }
-  fmt::print("run {}: {}\n", run->source.run, VerdictSentence(run->result));
   return kAllWithin;
 }
 

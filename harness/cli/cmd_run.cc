@@ -16,8 +16,8 @@
 #include "harness/cli/run_session.h"
 #include "harness/compare/summary.h"
 #include "harness/farm/slurm_farm.h"
-#include "harness/record/run_result_json.h"
 #include "harness/report/csv_report.h"
+#include "harness/report/json_report.h"
 #include "harness/report/run_table.h"
 #include "harness/report/wrap.h"
 #include "harness/sim/worker_pool.h"
@@ -33,12 +33,7 @@ struct Options {
 
 Status WriteReports(const RunOptions& options, const RunResult& result) {
   if (options.json) {
-    constexpr int kIndent = 1;
-    Status written = WriteFile(
-        *options.json,
-        RunResultToJson(result).dump(
-            kIndent, ' ', false, nlohmann::json::error_handler_t::replace) +
-            "\n");
+    Status written = WriteFile(*options.json, JsonReport(result));
     if (!written.ok()) {
       return written;
     }

@@ -154,9 +154,9 @@ Result<RunResult> RunInSession(const PreparedRun& prepared,
   const int arcs_before = record->progress ? record->progress->arcs_ended : 0;
   Result<RunResult> result = Characterize(
       prepared, simulator, &desk, static_cast<size_t>(arcs_before));
+  [[maybe_unused]] const Status noted =
+      store->NoteProgress(record->id, desk.progress());
   if (!result.ok()) {
-    [[maybe_unused]] const Status noted =
-        store->NoteProgress(record->id, desk.progress());
     return result;
   }
   result->facts.program = ProgramVersion();

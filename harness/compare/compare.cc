@@ -1,9 +1,12 @@
 #include "harness/compare/compare.h"
 
+#include <algorithm>
 #include <array>
 #include <cassert>
 #include <cmath>
+#include <optional>
 #include <string_view>
+#include <utility>
 
 #include <fmt/format.h>
 
@@ -75,10 +78,14 @@ void AppendReason(Comparison& comparison, const std::string& reason) {
   comparison.reason += reason;
 }
 
+double Expanded(const Figure& figure, double coverage) {
+  assert(figure.difference.u.has_value());
+  return coverage * figure.difference.u.value_or(0.0);
+}
+
 // Beyond on either figure outweighs doubt about the other.
 void Judge(const Figure& figure, double coverage, Comparison& comparison) {
-  assert(figure.difference.u.has_value());
-  const double expanded = coverage * figure.difference.u.value_or(0.0);
+  const double expanded = Expanded(figure, coverage);
   const bool beyond =
       std::abs(figure.difference.value) - expanded > figure.tolerance;
   if (beyond && comparison.verdict != Verdict::kBeyond) {
@@ -148,28 +155,33 @@ Comparison WithoutLine(const MeasuredArc& measured,
   return comparison;
 }
 
-}  // namespace
+// What there is to judge, or why there is nothing.
+struct Judgement {
+  Comparison comparison;
+  std::optional<std::array<Figure, 2>> figures;
+};
 
-Comparison Compare(const MeasuredArc& measured,
-                   const Calibration& calibration,
-                   const Tolerance& tolerance,
-                   double delay_u_relative) {
-  Comparison comparison = WithoutLine(measured, calibration, tolerance);
+Judgement Prepare(const MeasuredArc& measured,
+                  const Calibration& calibration,
+                  const Tolerance& tolerance,
+                  double delay_u_relative) {
+  Judgement judgement{WithoutLine(measured, calibration, tolerance), {}};
+  Comparison& comparison = judgement.comparison;
   if (!measured.failures.empty()) {
     comparison.reason = FirstFailure(measured.failures);
-    return comparison;
+    return judgement;
   }
   const Result<Line> line = FitLine(measured.points, delay_u_relative);
   if (!line.ok()) {
     comparison.reason = line.error().message;
-    return comparison;
+    return judgement;
   }
   if (calibration.p_inv.value <= 0.0) {
     comparison.reason = fmt::format(
         "p_inv of the reference inverter is {:.2f}: p by hand needs one above "
         "zero",
         calibration.p_inv.value);
-    return comparison;
+    return judgement;
   }
   comparison.line = *line;
   const auto figures = Measure(calibration, delay_u_relative, comparison);
@@ -177,14 +189,48 @@ Comparison Compare(const MeasuredArc& measured,
     comparison.reason =
         "uncertainty unknown: needs three points or more, of the arc and of "
         "the reference inverter";
-    return comparison;
+    return judgement;
   }
-  comparison.verdict = Verdict::kWithin;
-  const double coverage = CoverageFactor(line->points - 2);
-  for (const Figure& figure : figures) {
-    Judge(figure, coverage, comparison);
+  judgement.figures = figures;
+  return judgement;
+}
+
+}  // namespace
+
+Comparison Compare(const MeasuredArc& measured,
+                   const Calibration& calibration,
+                   const Tolerance& tolerance,
+                   double delay_u_relative) {
+  Judgement judgement =
+      Prepare(measured, calibration, tolerance, delay_u_relative);
+  Comparison& comparison = judgement.comparison;
+  if (judgement.figures) {
+    comparison.verdict = Verdict::kWithin;
+    const double coverage = CoverageFactor(comparison.line->points - 2);
+    for (const Figure& figure : *judgement.figures) {
+      Judge(figure, coverage, comparison);
+    }
   }
-  return comparison;
+  return std::move(comparison);
+}
+
+bool IsCloseCall(const MeasuredArc& measured,
+                 const Calibration& calibration,
+                 const Tolerance& tolerance,
+                 double delay_u_relative) {
+  const Judgement judgement =
+      Prepare(measured, calibration, tolerance, delay_u_relative);
+  if (!judgement.figures) {
+    return false;
+  }
+  const double coverage = CoverageFactor(judgement.comparison.line->points - 2);
+  return std::any_of(judgement.figures->begin(),
+                     judgement.figures->end(),
+                     [&](const Figure& figure) {
+                       const double margin =
+                           figure.tolerance - std::abs(figure.difference.value);
+                       return std::abs(margin) < Expanded(figure, coverage);
+                     });
 }
 
 }  // namespace gatedyno

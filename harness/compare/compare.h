@@ -47,6 +47,14 @@ Comparison Compare(const MeasuredArc& measured,
                    const Tolerance& tolerance,
                    double delay_u_relative = 0.0);
 
+// Whether the verdict of a measured arc hangs on its uncertainty: the limit of
+// g or of p lies within U of the difference, so that more points may change it.
+// False where there is no verdict to change.
+bool IsCloseCall(const MeasuredArc& measured,
+                 const Calibration& calibration,
+                 const Tolerance& tolerance,
+                 double delay_u_relative);
+
 }  // namespace gatedyno
 
 #endif  // GATEDYNO_COMPARE_COMPARE_H_

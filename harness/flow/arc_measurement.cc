@@ -18,12 +18,8 @@ class Measurement : public std::enable_shared_from_this<Measurement> {
  public:
   Measurement(const ArcContext& context,
               const StageTest& test,
-              double tau_s,
               std::function<void(MeasuredArc)> on_done)
-      : context_(context),
-        test_(test),
-        tau_s_(tau_s),
-        on_done_(std::move(on_done)) {
+      : context_(context), test_(test), on_done_(std::move(on_done)) {
     measured_.arc = test.arc;
     measured_.estimate = test.estimate;
   }
@@ -86,8 +82,8 @@ class Measurement : public std::enable_shared_from_this<Measurement> {
         measured_.points.end(),
         [](const Point& a, const Point& b) { return a.fanout < b.fanout; });
     if (failures_.empty()) {
-      const std::vector<double> more =
-          MoreFanouts(*context_.fanouts, measured_.points, Tau());
+      const std::vector<double> more = MoreFanouts(
+          *context_.fanouts, measured_.points, Tau(), HangsOnUncertainty());
       if (!more.empty()) {
         Ask(more);
         return;
@@ -107,10 +103,18 @@ class Measurement : public std::enable_shared_from_this<Measurement> {
     on_done_(std::move(measured_));
   }
 
+  bool HangsOnUncertainty() const {
+    return context_.calibration != nullptr &&
+           IsCloseCall(measured_,
+                       *context_.calibration,
+                       context_.tolerance,
+                       context_.fanouts->delay_u_relative);
+  }
+
   // Of the reference inverter: its own slope, whatever its sign.
   double Tau() const {
-    if (tau_s_ > 0.0) {
-      return tau_s_;
+    if (context_.calibration != nullptr) {
+      return context_.calibration->tau_s.value;
     }
     const Result<Line> line = FitLine(measured_.points);
     return line.ok() && line->slope_s > 0.0 ? line->slope_s : test_.time_unit_s;
@@ -123,7 +127,6 @@ class Measurement : public std::enable_shared_from_this<Measurement> {
 
   ArcContext context_;
   StageTest test_;
-  double tau_s_;
   std::function<void(MeasuredArc)> on_done_;
   MeasuredArc measured_;
   std::vector<Failure> failures_;
@@ -134,9 +137,8 @@ class Measurement : public std::enable_shared_from_this<Measurement> {
 
 void MeasureArc(const ArcContext& context,
                 const StageTest& test,
-                double tau_s,
                 std::function<void(MeasuredArc)> on_done) {
-  std::make_shared<Measurement>(context, test, tau_s, std::move(on_done))
+  std::make_shared<Measurement>(context, test, std::move(on_done))
       ->Ask(FirstFanouts(*context.fanouts));
 }
 

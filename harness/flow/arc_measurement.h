@@ -18,17 +18,18 @@ struct ArcContext {
   const Bench* bench = nullptr;
   const FanoutRule* fanouts = nullptr;
   AccuracySample* sample = nullptr;
-  bool always_checked = false;  // The first fanout is part of the sample.
   WorkDesk* desk = nullptr;
+  bool always_checked = false;  // The first fanout is part of the sample.
+  // What the arcs are compared with; null for the reference inverter itself.
+  const Calibration* calibration = nullptr;
+  Tolerance tolerance = {};
 };
 
-// `test` but its fanout describes the arc; `tau_s` scales how straight it must
-// be (0: its own slope does).  `on_done` is called once the arc's jobs have
-// ended, from here or from the desk's Work; everything in `context` lives until
-// then.  Points come in the order of their fanouts.
+// `test` but its fanout describes the arc.  `on_done` is called once the arc's
+// jobs have ended, from here or from the desk's Work; everything in `context`
+// lives until then.  Points come in the order of their fanouts.
 void MeasureArc(const ArcContext& context,
                 const StageTest& test,
-                double tau_s,
                 std::function<void(MeasuredArc)> on_done);
 
 }  // namespace gatedyno

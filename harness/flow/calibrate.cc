@@ -95,10 +95,8 @@ Result<std::map<std::string, ReferenceArcs>> MeasureReferences(
     context.bench = &benches.at(corner->name);
     for (const Edge edge : {Edge::kRise, Edge::kFall}) {
       MeasuredArc& arc = edge == Edge::kRise ? arcs.rise : arcs.fall;
-      constexpr double kOwnTau = 0.0;
       MeasureArc(context,
                  InverterTest(run.node, inverter, edge),
-                 kOwnTau,
                  [&arc](MeasuredArc measured) { arc = std::move(measured); });
     }
     ++corner;

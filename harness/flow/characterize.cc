@@ -109,19 +109,18 @@ class ArcSweep {
     const Place& place = places_[next_];
     next_ = (next_ + 1) % places_.size();
     context_.bench = &benches_.at(place.calibration->corner.name);
+    context_.calibration = place.calibration;
+    context_.tolerance = run_.plan.tolerance;
     size_t arc = place.first_arc;
     for (const StageTest& test :
          ArcTests(run_, place.cell, *place.calibration)) {
       MeasuredArc& measured = measured_[arc++];
       ++arcs_asked_;
-      MeasureArc(context_,
-                 test,
-                 place.calibration->tau_s.value,
-                 [this, &measured](MeasuredArc ended) {
-                   measured = std::move(ended);
-                   ++progress().arcs_ended;
-                   Expect();
-                 });
+      MeasureArc(context_, test, [this, &measured](MeasuredArc ended) {
+        measured = std::move(ended);
+        ++progress().arcs_ended;
+        Expect();
+      });
     }
     return true;
   }

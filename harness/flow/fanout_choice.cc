@@ -31,7 +31,8 @@ std::vector<double> FirstFanouts(const FanoutRule& rule) {
 
 std::vector<double> MoreFanouts(const FanoutRule& rule,
                                 std::span<const Point> points,
-                                double tau_s) {
+                                double tau_s,
+                                bool close_call) {
   if (!rule.fixed.empty()) {
     return {};
   }
@@ -40,7 +41,8 @@ std::vector<double> MoreFanouts(const FanoutRule& rule,
   const Linearity linearity =
       TestLinearity(*line, points, tau_s, rule.delay_u_relative);
   const bool is_first = points.size() == Steps().front().size();
-  if (linearity.straight && (!is_first || IsSlopeCertain(*line))) {
+  if (linearity.straight && !close_call &&
+      (!is_first || IsSlopeCertain(*line))) {
     return {};
   }
   size_t measured = 0;

@@ -2,9 +2,9 @@
 //
 //   1 4 6          three points give a line, and with the known numerical
 //                  error of the delays they also tell how much it bends
-//   + 2 3          where that proves nothing, or the slope is uncertain by more
-//                  than kWantedSlope
-//   + 1.5 5        where it still is not straight
+//   + 2 3          where that proves nothing, the slope is uncertain by more
+//                  than kWantedSlope, or the verdict hangs on the uncertainty
+//   + 1.5 5        where it still is not straight, or the verdict still hangs
 //
 // A plan that names fanouts gets these and no others.
 
@@ -32,10 +32,12 @@ struct FanoutRule {
 std::vector<double> FirstFanouts(const FanoutRule& rule);
 
 // What to measure next, given all points so far; none when they are enough.
+// `close_call`: the verdict hangs on the uncertainty (compare/compare.h).
 // REQUIRES: points at two fanouts or more; tau_s > 0.
 std::vector<double> MoreFanouts(const FanoutRule& rule,
                                 std::span<const Point> points,
-                                double tau_s);
+                                double tau_s,
+                                bool close_call);
 
 // All that an arc may be measured at.
 std::vector<double> AllFanouts(const FanoutRule& rule);

@@ -14,7 +14,8 @@ namespace {
 constexpr std::string_view kNone = "&ndash;";
 
 struct Column {
-  std::string_view key;  // What the script sorts by; see page.js.
+  std::string_view
+      key;  // What the script sorts by; see reports/script/arc_table.js.
   std::string_view head;
 };
 

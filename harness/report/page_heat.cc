@@ -22,19 +22,16 @@ namespace {
 // What one map is of.
 struct Subject {
   std::string_view symbol;
-  std::string_view title;
   double (*difference)(const Comparison&);
   double (*tolerance)(const Comparison&);
 };
 
 constexpr Subject kEffort = {
     "g",
-    "effort g",
     [](const Comparison& row) { return row.effort_difference; },
     [](const Comparison& row) { return row.tolerance.effort; }};
 constexpr Subject kParasitic = {
     "p",
-    "parasitic delay p",
     [](const Comparison& row) { return row.parasitic_difference; },
     [](const Comparison& row) { return row.tolerance.parasitic; }};
 
@@ -58,6 +55,12 @@ void AddNew(const std::string& name, std::vector<std::string>* names) {
   }
 }
 
+// A verdict is on g and p together.
+bool IsBeyond(const Comparison& row, const Subject& subject) {
+  return row.verdict == Verdict::kBeyond &&
+         std::abs(subject.difference(row)) > subject.tolerance(row);
+}
+
 Grid GridOf(const RunResult& result, const Subject& subject) {
   Grid grid;
   const std::vector<Comparison>& rows = result.comparisons;
@@ -65,9 +68,7 @@ Grid GridOf(const RunResult& result, const Subject& subject) {
     AddNew(rows[i].arc.cell, &grid.cells);
     AddNew(rows[i].corner, &grid.corners);
     Place& place = grid.places[{rows[i].arc.cell, rows[i].corner}];
-    place.some_beyond |=
-        rows[i].verdict == Verdict::kBeyond && rows[i].line &&
-        std::abs(subject.difference(rows[i])) > subject.tolerance(rows[i]);
+    place.some_beyond |= IsBeyond(rows[i], subject);
     place.some_unmeasured |= rows[i].verdict == Verdict::kNotMeasured;
     if (rows[i].line && (!place.worst || std::abs(subject.difference(rows[i])) >
                                              std::abs(subject.difference(
@@ -122,10 +123,10 @@ std::string Map(const RunResult& result, const Subject& subject) {
   return fmt::format(
       "<div class=\"wide\" role=\"region\" tabindex=\"0\" aria-label=\"largest "
       "difference of {} by cell and corner\"><table class=\"heat\"><caption>"
-      "Largest difference of {} by cell and corner</caption>\n<thead><tr>{}"
+      "Largest difference of {}</caption>\n<thead><tr>{}"
       "</tr></thead>\n<tbody>\n{}</tbody></table></div>\n",
       subject.symbol,
-      subject.title,
+      subject.symbol,
       head,
       body);
 }

@@ -16,7 +16,7 @@ struct PagePart {
 // page.html, with a {{name}} where something is to be filled in.
 extern const PagePart kPageShell;
 extern const PagePart kPageStyle;      // page.css
-extern const PagePart kPageScript;     // page.js
+extern const PagePart kPageScript;     // script/*.js, as one
 extern const PagePart kChartScript;    // vendor/charts.min.js
 extern const PagePart kChartLicences;  // vendor/LICENSES.txt
 

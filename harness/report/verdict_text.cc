@@ -64,9 +64,12 @@ std::string VerdictSentence(const RunResult& result) {
     return "Nothing was measured, so nothing can be said of the hand numbers.";
   }
   if (summary.beyond == 0 && summary.not_measured == 0) {
-    return fmt::format("All {} of {} lie within what is allowed ({}).",
-                       Counted(arcs, "arc"),
-                       Counted(all_cells, "cell"),
+    const std::string all = arcs == 1 ? "The only arc lies"
+                                      : fmt::format("All {} arcs of {} lie",
+                                                    arcs,
+                                                    Counted(all_cells, "cell"));
+    return fmt::format("{} within what is allowed ({}).",
+                       all,
                        Allowed(result.facts.tolerance));
   }
   const std::string unmeasured =

@@ -20,8 +20,9 @@ using Clock = PoolWorker::Clock;
 // program stores the last outcome.
 constexpr size_t kJobsPerWorkerAtOnce = 2;
 
-// A start that fails this often in a row will go on failing.
-constexpr int kFailedStartsBeforeGivingUp = 3;
+// A start that fails this often in a row will go on failing.  Not at once: who
+// kills workers now and then may hit some before they are ready.
+constexpr int kFailedStartsBeforeGivingUp = 10;
 
 // A worker whose input ended leaves in a few milliseconds.
 constexpr std::chrono::milliseconds kLeaveGrace(1000);

@@ -7,7 +7,6 @@
 // first tells the error of the simulation, the second adds that of the choice.
 
 #include <algorithm>
-#include <cmath>
 #include <iterator>
 #include <map>
 #include <string>
@@ -17,53 +16,22 @@
 #include <fmt/format.h>
 
 #include "harness/deck/stage_measures.h"
-#include "harness/fit/coverage.h"
 #include "harness/fit/line_fit.h"
 #include "harness/flow/fanout_choice.h"
 #include "harness/sim/job_list.h"
 #include "tests/bench/golden.h"
 #include "tests/bench/parts.h"
 #include "tests/bench/scene.h"
-#include "tests/bench/statistics.h"
-#include "tests/bench/target.h"
+#include "tests/bench/tally.h"
 
 namespace gatedyno {
 namespace {
 
-constexpr double kPercent = 100.0;
 constexpr const char* kNodes[] = {"p45", "p180"};
 constexpr size_t kEveryCellInFull = 4;
 // Twice the step of the speed's golden at 45 nm, which would take twice as
 // long; a few decks with half of it tell what that costs.
 constexpr double kStepInTau = 1.0 / 20.0;
-
-// How often an error lies within its uncertainty.
-struct Coverage {
-  int arcs = 0;
-  int within_two_u = 0;
-  int within_expanded = 0;  // k u, k for the line's few points.
-
-  void Add(double error, double u, int points) {
-    ++arcs;
-    within_two_u += std::abs(error) <= 2.0 * u ? 1 : 0;
-    within_expanded +=
-        std::abs(error) <= CoverageFactor(points - 2) * u ? 1 : 0;
-  }
-};
-
-struct Tally {
-  RelativeErrors delays;
-  RelativeErrors effort;       // Golden at the arc's own fanouts.
-  RelativeErrors effort_full;  // Golden at all fanouts.
-  Coverage coverage;
-  Coverage coverage_full;
-  RelativeErrors half_step;  // Golden against golden with half its step.
-  std::map<int, int> arcs_by_points;
-  int exact = 0;  // Arcs of the reference inverter itself.
-  int not_measured = 0;
-  int golden_decks = 0;
-  int loosened = 0;
-};
 
 struct ChosenArc {
   StageTest test;
@@ -312,41 +280,6 @@ Status TallyNode(size_t turn, Tally* tally) {
     }
   }
   return Ok();
-}
-
-bool JudgeCoverage(const char* what, const Coverage& coverage) {
-  constexpr double kLeastShare = 95.0;
-  const double per_arc = kPercent / coverage.arcs;
-  Figure(fmt::format("arcs, golden at {}", what), coverage.arcs);
-  const bool good = AtLeast("  of them within 2 u(g), %",
-                            coverage.within_two_u * per_arc,
-                            kLeastShare);
-  Figure("  of them within k u(g), %", coverage.within_expanded * per_arc);
-  return good;
-}
-
-bool PrintTally(const Tally& tally) {
-  fmt::print("\naccuracy: one input of each built-in cell, at p45 or p180\n");
-  Figure("golden decks", tally.golden_decks);
-  Figure("  of them with tolerances ten times as wide", tally.loosened);
-  fmt::print("  golden against half its step: {}\n", tally.half_step.Text());
-  for (const auto& [points, arcs] : tally.arcs_by_points) {
-    Figure(fmt::format("arcs of {} points", points), arcs);
-  }
-  Figure("arcs not measured", tally.not_measured);
-  Figure("arcs exact by definition, not counted below", tally.exact);
-  fmt::print("  delays: {}\n", tally.delays.Text());
-  fmt::print("  g, own fanouts: {}\n", tally.effort.Text());
-  fmt::print("  g, all fanouts: {}\n", tally.effort_full.Text());
-  constexpr double kDelay = 0.2;
-  constexpr double kEffort = 0.3;
-  bool good = AtMost(
-      "largest error of a delay, %", kPercent * tally.delays.largest(), kDelay);
-  good &= AtMost(
-      "largest error of g, %", kPercent * tally.effort.largest(), kEffort);
-  good &= JudgeCoverage("their own fanouts", tally.coverage);
-  good &= JudgeCoverage("all fanouts", tally.coverage_full);
-  return good;
 }
 
 }  // namespace

@@ -44,7 +44,8 @@ Job GoldenJob(const Job& job, double step_s) {
   Job golden = job;
   golden.settings = {
       ".options reltol=1e-6 chgtol=1e-20 trtol=1 num_threads=1\n",
-      ".options reltol=1e-5 chgtol=1e-19 trtol=1 num_threads=1\n"};
+      ".options reltol=1e-5 chgtol=1e-19 trtol=1 num_threads=1\n",
+      ".options reltol=1e-4 chgtol=1e-18 trtol=1 num_threads=1\n"};
   golden.time_limit_s = 600.0;
   golden.deck = WithFixedStep(std::move(golden.deck), job, step_s);
   return golden;

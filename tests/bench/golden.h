@@ -17,7 +17,8 @@ namespace gatedyno {
 inline constexpr double kGoldenStep_s = 0.05e-12;
 
 // Where the simulator cannot hold the tolerances ("timestep too small") the
-// pool goes on to the second rung, a tenth as tight: Outcome::rung tells.
+// pool goes on to the next rung, a tenth as tight, and once more:
+// Outcome::rung tells.
 Job GoldenJob(const Job& job, double step_s);
 
 // Simulates every job as golden, under its own name and key.

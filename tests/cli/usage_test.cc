@@ -31,6 +31,7 @@ TEST(UsageTest, HelpNamesCommandsAndExitCodes) {
                            "deck ",
                            "status ",
                            "replay ",
+                           "report ",
                            "Exit codes: 0 all within, 1 some beyond, 2 bad "
                            "input, 3 jobs that could not be measured,"}) {
     EXPECT_THAT(help.out, HasSubstr(text));
@@ -41,7 +42,8 @@ TEST(UsageTest, HelpNamesCommandsAndExitCodes) {
 }
 
 TEST(UsageTest, EveryCommandHasHelp) {
-  for (const char* command : {"estimate", "run", "deck", "status", "replay"}) {
+  for (const char* command :
+       {"estimate", "run", "deck", "status", "replay", "report"}) {
     const Ended help = Program().Run({command, "--help"});
     EXPECT_EQ(help.exit_code, 0) << command;
     EXPECT_THAT(help.out, HasSubstr("Usage: gatedyno " + std::string(command)));

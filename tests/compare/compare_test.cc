@@ -258,5 +258,34 @@ TEST(ToleranceTest, HoldsThePublishedSpreadOfEffort) {
   EXPECT_LT(Tolerance{}.effort, std::abs(mean) + 3.0 * deviation);
 }
 
+// U(g) is 8.6 % at a residual of 0.04 tau, as above; allowed 25 %.
+TEST(CompareTest, AVerdictHangsWhereTheLimitIsWithinTheUncertainty) {
+  struct Case {
+    const char* what;
+    double g_difference;
+    bool hangs;
+  };
+  const Case cases[] = {
+      {"far within", -0.10, false},
+      {"within, but not surely", -0.20, true},
+      {"beyond, but not surely", 0.30, true},
+      {"surely beyond", 0.40, false},
+  };
+  constexpr double kResidualTau = 0.04;
+  for (const Case& test : cases) {
+    const double g = 4.0 / 3.0 * (1.0 + test.g_difference);
+    // p on the hand number, and its own limit far away.
+    EXPECT_EQ(IsCloseCall(Nand2(g, 3.0, kResidualTau),
+                          Inverter(),
+                          {.effort = 0.25, .parasitic = 0.9},
+                          0.0),
+              test.hangs)
+        << test.what;
+  }
+  MeasuredArc failed = Nand2(1.0, 3.0, kResidualTau);
+  failed.failures = {"h=4: timed out"};
+  EXPECT_FALSE(IsCloseCall(failed, Inverter(), {}, 0.0));
+}
+
 }  // namespace
 }  // namespace gatedyno

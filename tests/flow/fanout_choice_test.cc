@@ -16,6 +16,7 @@ struct World {
   double kick_tau;  // On the point at fanout 4.
   double delay_u_relative;
   std::vector<double> measured_at;
+  bool close_call = false;
 };
 
 std::vector<Point> PointsAt(const std::vector<double>& fanouts,
@@ -34,7 +35,7 @@ std::vector<double> Follow(const FanoutRule& rule, const World& world) {
   std::vector<double> fanouts = FirstFanouts(rule);
   while (true) {
     const std::vector<double> more =
-        MoreFanouts(rule, PointsAt(fanouts, world), kTauS);
+        MoreFanouts(rule, PointsAt(fanouts, world), kTauS, world.close_call);
     if (more.empty()) {
       return fanouts;
     }
@@ -52,6 +53,12 @@ TEST(FanoutChoiceTest, AsFewAsProveTheLineStraight) {
       {"bent", 0.03, 0.0, 0.001, {1, 4, 6, 2, 3, 1.5, 5}},
       {"one point off", 0.0, 0.2, 0.001, {1, 4, 6, 2, 3, 1.5, 5}},
       {"delays too inexact to tell", 0.0, 0.0, 0.05, {1, 4, 6, 2, 3, 1.5, 5}},
+      {"the verdict hangs on the uncertainty",
+       0.0,
+       0.0,
+       0.001,
+       {1, 4, 6, 2, 3, 1.5, 5},
+       true},
       {"and not known to be any better", 0.0, 0.0, 0.0, {1, 4, 6, 2, 3}},
   };
   for (const World& world : worlds) {

@@ -32,9 +32,7 @@ Status Save(const std::filesystem::path& path, const RunResult& result) {
   }
   size_t next = 0;
   return store->FinishRun(
-      *run,
-      RunHeadToJson(result).dump(),
-      [&]() -> std::optional<std::string> {
+      *run, RunHeadToJson(result).dump(), [&]() -> std::optional<std::string> {
         return next == result.comparisons.size()
                    ? std::nullopt
                    : std::optional(

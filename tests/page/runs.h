@@ -41,17 +41,17 @@ inline Comparison MeasuredRow(const std::string& cell,
   }
   if (std::abs(difference) > row.tolerance.effort) {
     row.verdict = Verdict::kBeyond;
-    row.reason = fmt::format("g {:.2f} against {:.2f} by hand: {:+.1f} % "
-                             "(allowed 25 %)",
-                             row.effort.value,
-                             row.estimate.effort,
-                             100.0 * difference);
+    row.reason = fmt::format(
+        "g {:.2f} against {:.2f} by hand: {:+.1f} % "
+        "(allowed 25 %)",
+        row.effort.value,
+        row.estimate.effort,
+        100.0 * difference);
   }
   return row;
 }
 
-inline void AddCells(const std::vector<std::string>& names,
-                     RunResult* result) {
+inline void AddCells(const std::vector<std::string>& names, RunResult* result) {
   for (const std::string& name : names) {
     result->cells.push_back({name, {"y = !(a & b)"}, 1, 2, 1});
   }
@@ -112,8 +112,8 @@ inline RunResult LargeRun() {
       for (int pin = 0; pin < kPins; ++pin) {
         for (const Edge edge : {Edge::kRise, Edge::kFall}) {
           const double difference = kSpread * std::sin(++count * 0.7);
-          result.comparisons.push_back(MeasuredRow(
-              name, fmt::format("in{}", pin), edge, difference));
+          result.comparisons.push_back(
+              MeasuredRow(name, fmt::format("in{}", pin), edge, difference));
           result.comparisons.back().corner = calibration.corner.name;
           result.comparisons.back().arc.side = {{"enable", true}};
         }

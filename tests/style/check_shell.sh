@@ -8,5 +8,6 @@ if ! command -v shellcheck >/dev/null; then
   exit 77
 fi
 mapfile -t scripts < <(find tests -name '*.sh')
+scripts+=(reports/make_sample tests/bench/run)
 shellcheck quickstart .ci/run "${scripts[@]}"
 echo "all scripts are clean"
