@@ -1,6 +1,5 @@
 // gatedyno status: how the runs of a store stand, from another terminal.
 
-#include <chrono>
 #include <memory>
 #include <string>
 
@@ -20,12 +19,6 @@ struct Options {
   bool json = false;
 };
 
-UnixMilliseconds Now() {
-  return std::chrono::duration_cast<std::chrono::milliseconds>(
-             std::chrono::system_clock::now().time_since_epoch())
-      .count();
-}
-
 Result<StoreView> Look(const std::string& file) {
   Result<Store> store = Store::Open(file, {.read_only = true});
   if (!store.ok()) {
@@ -41,7 +34,7 @@ Result<StoreView> Look(const std::string& file) {
   return StoreView{.store = file,
                    .runs = *std::move(runs),
                    .locked = locked_before || RunsLocked(file),
-                   .now = Now()};
+                   .now = UnixNow()};
 }
 
 Result<ExitCode> Show(const Options& options) {

@@ -55,7 +55,7 @@ Result<RunRecord> EnterRun(const RunInfo& info, Store* store) {
     return Forward(id);
   }
   record.id = *id;
-  record.started = static_cast<UnixMilliseconds>(std::time(nullptr)) * 1000;
+  record.started = UnixNow();
   return record;
 }
 

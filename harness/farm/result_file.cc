@@ -62,7 +62,7 @@ Status PublishStore(const std::filesystem::path& from,
 }
 
 Result<ResultReader> ResultReader::Open(const std::filesystem::path& path) {
-  Result<ScratchFolder> scratch = ScratchFolder::Make();
+  Result<ScratchFolder> scratch = ScratchFolder::Make("gatedyno-farm");
   if (!scratch.ok()) {
     return Forward(scratch);
   }

@@ -8,7 +8,7 @@
 #include <string>
 
 #include "harness/base/result.h"
-#include "harness/farm/scratch_folder.h"
+#include "harness/base/scratch_folder.h"
 #include "harness/record/outcome.h"
 #include "harness/store/store.h"
 

@@ -10,10 +10,10 @@
 
 #include <fmt/format.h>
 
+#include "harness/base/scratch_folder.h"
 #include "harness/farm/outbox.h"
 #include "harness/farm/result_file.h"
 #include "harness/farm/round_folder.h"
-#include "harness/farm/scratch_folder.h"
 #include "harness/farm/share_file.h"
 #include "harness/sim/worker_pool.h"
 
@@ -200,7 +200,7 @@ Result<TaskEnd> RunTask(const TaskOptions& options) {
   if (const Status same = CheckSimulator(options, &*pool); !same.ok()) {
     return Forward(same);
   }
-  const Result<ScratchFolder> scratch = ScratchFolder::Make();
+  const Result<ScratchFolder> scratch = ScratchFolder::Make("gatedyno-farm");
   if (!scratch.ok()) {
     return Forward(scratch);
   }

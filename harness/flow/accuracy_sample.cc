@@ -21,14 +21,14 @@ bool AccuracySample::Wants(const std::string& job_key) const {
   return number % kOneIn == 0;
 }
 
-void AccuracySample::Add(const Job& job,
+void AccuracySample::Add(const std::string& job_key,
+                         const std::string& label,
                          const Outcome& run,
                          const Outcome& tighter) {
   const auto relative = [&](Edge edge) {
     return DelayOf(run, edge) / DelayOf(tighter, edge) - 1.0;
   };
-  changes_[job.key] = {job.label,
-                       {relative(Edge::kRise), relative(Edge::kFall)}};
+  changes_[job_key] = {label, {relative(Edge::kRise), relative(Edge::kFall)}};
 }
 
 AccuracyCheck AccuracySample::Check() const {

@@ -8,7 +8,6 @@
 #include <string>
 
 #include "harness/record/accuracy_check.h"
-#include "harness/record/job.h"
 #include "harness/record/outcome.h"
 
 namespace gatedyno {
@@ -24,7 +23,11 @@ class AccuracySample {
   bool Wants(const std::string& job_key) const;
 
   // REQUIRES: both are measured, on fanout decks of the same arc and fanout.
-  void Add(const Job& job, const Outcome& run, const Outcome& tighter);
+  // `label` is for people: the job that was simulated twice.
+  void Add(const std::string& job_key,
+           const std::string& label,
+           const Outcome& run,
+           const Outcome& tighter);
 
   // The same whatever order the jobs ended in.
   AccuracyCheck Check() const;

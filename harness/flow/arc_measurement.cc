@@ -46,12 +46,8 @@ class Measurement : public std::enable_shared_from_this<Measurement> {
     if (outcome.measured()) {
       measured_.points.push_back(PointOf(outcome, test_.arc, fanout));
       measured_.points.back().job_key = key;
-      // By what a job is, not by when it ends: the sample must be the same in
-      // every run.
-      const bool is_first = fanout == FirstFanouts(*context_.fanouts).front();
-      if (context_.sample->Wants(key) ||
-          (is_first && context_.always_checked)) {
-        AskTighter(fanout, outcome);
+      if (context_.sample->Wants(key) || IsAlwaysChecked(fanout)) {
+        AskTighter(fanout, key, outcome);
       }
     } else {
       failures_.push_back({fanout, outcome});
@@ -61,17 +57,26 @@ class Measurement : public std::enable_shared_from_this<Measurement> {
     }
   }
 
-  void AskTighter(double fanout, const Outcome& outcome) {
+  // By what a job is, not by when it ends: the sample must be the same in every
+  // run.
+  bool IsAlwaysChecked(double fanout) const {
+    return context_.always_checked &&
+           fanout == FirstFanouts(*context_.fanouts).front();
+  }
+
+  void AskTighter(double fanout,
+                  const std::string& key,
+                  const Outcome& outcome) {
     Bench tighter = *context_.bench;
     ++tighter.rung;
-    Job job = JobAt(*context_.bench, fanout);
-    job.deck.clear();  // Only its names are needed.
     Job twin = JobAt(tighter, fanout);
+    const std::string label = twin.label;
     twin.label += " (tighter)";
     context_.desk->Ask(
-        twin, [sample = context_.sample, job, outcome](const Outcome& again) {
+        twin,
+        [sample = context_.sample, key, label, outcome](const Outcome& again) {
           if (again.measured()) {
-            sample->Add(job, outcome, again);
+            sample->Add(key, label, outcome, again);
           }
         });
   }

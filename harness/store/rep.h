@@ -31,12 +31,6 @@ inline constexpr char kFindMeasuredSql[] =
 inline constexpr char kFindJobSql[] =
     "SELECT label, deck, measures, outcome, ended_ms FROM job WHERE key = ?1";
 
-inline UnixMilliseconds Now() {
-  const auto since_1970 = std::chrono::system_clock::now().time_since_epoch();
-  return std::chrono::duration_cast<std::chrono::milliseconds>(since_1970)
-      .count();
-}
-
 // A kept statement in use.  One left in the middle of its rows would hold the
 // file's state of that moment and keep the log from being cleared.
 class InUse {
@@ -109,7 +103,7 @@ struct Store::Rep {
     statement->bindNoCopy(2, job.label);
     statement->bindNoCopy(3, ending);
     statement->bindNoCopy(4, outcome_text);
-    statement->bind(5, Now());
+    statement->bind(5, UnixNow());
     statement->bindNoCopy(6, job.deck);
     statement->bindNoCopy(7, measures);
     statement->exec();

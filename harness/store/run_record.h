@@ -6,6 +6,7 @@
 #ifndef GATEDYNO_STORE_RUN_RECORD_H_
 #define GATEDYNO_STORE_RUN_RECORD_H_
 
+#include <chrono>
 #include <cstdint>
 #include <optional>
 #include <string>
@@ -16,7 +17,14 @@
 namespace gatedyno {
 
 using UnixMilliseconds = std::int64_t;  // Since 1970, UTC.
-using RunId = std::int64_t;             // Counts from 1 in each store.
+
+inline UnixMilliseconds UnixNow() {
+  return std::chrono::duration_cast<std::chrono::milliseconds>(
+             std::chrono::system_clock::now().time_since_epoch())
+      .count();
+}
+
+using RunId = std::int64_t;  // Counts from 1 in each store.
 
 // What a run is told of when it begins.
 struct RunInfo {

@@ -101,7 +101,7 @@ Result<RunId> Store::BeginRun(const RunInfo& info) {
   return rep_->InTransaction([&]() -> Result<RunId> {
     SQLite::Statement statement(rep_->database, kBeginRun);
     BindInfo(info, &statement);
-    statement.bind(5, Now());
+    statement.bind(5, UnixNow());
     statement.exec();
     return rep_->database.getLastInsertRowid();
   });
@@ -126,7 +126,7 @@ Status Store::ResumeRun(RunId run) {
   return rep_->InTransaction([&]() -> Status {
     SQLite::Statement statement(rep_->database, kResumeRun);
     statement.bind(1, run);
-    statement.bind(2, Now());
+    statement.bind(2, UnixNow());
     return statement.exec() == 0 ? rep_->NoSuchRun(run) : Ok();
   });
 }
@@ -136,7 +136,7 @@ Status Store::NoteProgress(RunId run, const RunProgress& progress) {
     SQLite::Statement statement(rep_->database, kNoteProgress);
     statement.bind(1, run);
     statement.bind(2, ProgressToText(progress));
-    statement.bind(3, Now());
+    statement.bind(3, UnixNow());
     return statement.exec() == 0 ? rep_->NoSuchRun(run) : Ok();
   });
 }
@@ -151,7 +151,7 @@ Status Store::FinishRun(RunId run,
     SQLite::Statement finish(rep_->database, kFinishRun);
     finish.bind(1, run);
     finish.bindNoCopy(2, head);
-    finish.bind(3, Now());
+    finish.bind(3, UnixNow());
     if (finish.exec() == 0) {
       return rep_->NoSuchRun(run);
     }

@@ -1,7 +1,5 @@
 #include "harness/worker/private_folder.h"
 
-#include <cerrno>
-#include <cstdlib>
 #include <system_error>
 #include <utility>
 
@@ -10,59 +8,36 @@
 #include "harness/base/file.h"
 
 namespace gatedyno {
-namespace {
-
-Result<std::filesystem::path> MakeTemporaryFolder() {
-  std::error_code failed;
-  std::string name =
-      (std::filesystem::temp_directory_path(failed) / "gatedyno-XXXXXX")
-          .string();
-  if (failed || ::mkdtemp(name.data()) == nullptr) {
-    const std::error_code reason(errno, std::generic_category());
-    return Unavailable(fmt::format("{}: cannot be made: {}",
-                                   failed ? "a temporary folder" : name,
-                                   (failed ? failed : reason).message()));
-  }
-  return std::filesystem::path(name);
-}
-
-}  // namespace
 
 Result<PrivateFolder> PrivateFolder::Enter() {
   std::error_code failed;
   std::filesystem::path before = std::filesystem::current_path(failed);
-  Result<std::filesystem::path> folder = MakeTemporaryFolder();
+  Result<ScratchFolder> folder = ScratchFolder::Make("gatedyno");
   if (!folder.ok()) {
     return Forward(folder);
   }
-  PrivateFolder entered(*folder, std::move(before));
-  if (const Status written = WriteFile(*folder / ".spiceinit", "");
+  const std::filesystem::path path = folder->path();
+  PrivateFolder entered(*std::move(folder), std::move(before));
+  if (const Status written = WriteFile(path / ".spiceinit", "");
       !written.ok()) {
     return Forward(written);
   }
-  std::filesystem::current_path(*folder, failed);
+  std::filesystem::current_path(path, failed);
   if (failed) {
     return Unavailable(fmt::format(
-        "{}: cannot be entered: {}", folder->string(), failed.message()));
+        "{}: cannot be entered: {}", path.string(), failed.message()));
   }
   return entered;
 }
 
-PrivateFolder::PrivateFolder(std::filesystem::path folder,
-                             std::filesystem::path before)
+PrivateFolder::PrivateFolder(ScratchFolder folder, std::filesystem::path before)
     : folder_(std::move(folder)), before_(std::move(before)) {}
 
-PrivateFolder::PrivateFolder(PrivateFolder&& other) noexcept
-    : folder_(std::exchange(other.folder_, {})),
-      before_(std::exchange(other.before_, {})) {}
-
 PrivateFolder::~PrivateFolder() {
-  if (folder_.empty()) {
-    return;
+  if (!folder_.path().empty()) {
+    std::error_code ignored;
+    std::filesystem::current_path(before_, ignored);
   }
-  std::error_code ignored;
-  std::filesystem::current_path(before_, ignored);
-  std::filesystem::remove_all(folder_, ignored);
 }
 
 }  // namespace gatedyno

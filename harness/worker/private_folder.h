@@ -9,6 +9,7 @@
 #include <filesystem>
 
 #include "harness/base/result.h"
+#include "harness/base/scratch_folder.h"
 
 namespace gatedyno {
 
@@ -19,13 +20,13 @@ class PrivateFolder {
 
   // Changes back and removes it.
   ~PrivateFolder();
-  PrivateFolder(PrivateFolder&& other) noexcept;
+  PrivateFolder(PrivateFolder&& other) noexcept = default;
   PrivateFolder& operator=(PrivateFolder&&) = delete;
 
  private:
-  PrivateFolder(std::filesystem::path folder, std::filesystem::path before);
+  PrivateFolder(ScratchFolder folder, std::filesystem::path before);
 
-  std::filesystem::path folder_;  // Empty once moved from.
+  ScratchFolder folder_;
   std::filesystem::path before_;
 };
 

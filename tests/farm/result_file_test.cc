@@ -54,7 +54,7 @@ TEST(ResultFileTest, TheCopyGoesWithTheReader) {
 
 TEST(ScratchFolderTest, SaysWhereNoneCanBeMade) {
   ::setenv("TMPDIR", "/proc", 1);
-  const auto scratch = ScratchFolder::Make();
+  const auto scratch = ScratchFolder::Make("gatedyno-farm");
   ::unsetenv("TMPDIR");
   ASSERT_FALSE(scratch.ok());
   EXPECT_EQ(scratch.error().message,

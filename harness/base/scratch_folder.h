@@ -1,9 +1,10 @@
 // A folder of our own on this machine's disk, gone with the object.
 
-#ifndef GATEDYNO_FARM_SCRATCH_FOLDER_H_
-#define GATEDYNO_FARM_SCRATCH_FOLDER_H_
+#ifndef GATEDYNO_BASE_SCRATCH_FOLDER_H_
+#define GATEDYNO_BASE_SCRATCH_FOLDER_H_
 
 #include <filesystem>
+#include <string_view>
 
 #include "harness/base/result.h"
 
@@ -11,22 +12,23 @@ namespace gatedyno {
 
 class ScratchFolder {
  public:
-  // In the folder for temporary files (TMPDIR): a result is a store, and those
-  // do not work on network file systems.
-  static Result<ScratchFolder> Make();
+  // In the folder for temporary files (TMPDIR), "STEM-" and six characters
+  // more.
+  static Result<ScratchFolder> Make(std::string_view stem);
 
   ScratchFolder(ScratchFolder&& other) noexcept;
   ScratchFolder& operator=(ScratchFolder&&) = delete;
   ~ScratchFolder();
 
+  // Empty once moved from.
   const std::filesystem::path& path() const { return path_; }
 
  private:
   explicit ScratchFolder(std::filesystem::path path);
 
-  std::filesystem::path path_;  // Empty once moved from.
+  std::filesystem::path path_;
 };
 
 }  // namespace gatedyno
 
-#endif  // GATEDYNO_FARM_SCRATCH_FOLDER_H_
+#endif  // GATEDYNO_BASE_SCRATCH_FOLDER_H_

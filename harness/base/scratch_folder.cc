@@ -1,4 +1,4 @@
-#include "harness/farm/scratch_folder.h"
+#include "harness/base/scratch_folder.h"
 
 #include <cerrno>
 #include <cstdlib>
@@ -10,11 +10,11 @@
 
 namespace gatedyno {
 
-Result<ScratchFolder> ScratchFolder::Make() {
+Result<ScratchFolder> ScratchFolder::Make(std::string_view stem) {
   std::error_code failed;
   const std::filesystem::path parent =
       std::filesystem::temp_directory_path(failed);
-  std::string name = (parent / "gatedyno-farm-XXXXXX").string();
+  std::string name = (parent / fmt::format("{}-XXXXXX", stem)).string();
   if (failed || ::mkdtemp(name.data()) == nullptr) {
     return Unavailable(fmt::format(
         "{}: no temporary folder can be made: {}; set TMPDIR",
