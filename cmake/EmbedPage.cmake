@@ -21,15 +21,23 @@ function(embed_file name file)
 endfunction()
 
 embed_file(kPageShell page.html)
+embed_file(kVersusShell versus.html)
 embed_file(kPageStyle page.css)
 embed_file(kChartScript vendor/charts.min.js)
 embed_file(kChartLicences vendor/LICENSES.txt)
 
 # One script of all its parts, in a scope of its own.
-set(script "(() => {\n")
-foreach(part IN ITEMS common charts differences pictures arc_table main)
-  file(READ ${SOURCE}/script/${part}.js text)
-  string(APPEND script "${text}")
-endforeach()
-embed(kPageScript "${script}})();\n")
+function(embed_script name)
+  set(script "(() => {\n")
+  foreach(part IN LISTS ARGN)
+    file(READ ${SOURCE}/script/${part}.js text)
+    string(APPEND script "${text}")
+  endforeach()
+  embed(${name} "${script}})();\n")
+endfunction()
+
+embed_script(kPageScript common charts redraw differences pictures waves
+  arc_table sort_filter main)
+embed_script(kVersusScript common charts redraw versus_pairs sort_filter
+  versus_changes versus_main)
 file(APPEND ${OUTPUT} "\n}  // namespace gatedyno\n")

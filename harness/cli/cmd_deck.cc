@@ -10,6 +10,7 @@
 #include "harness/cli/commands.h"
 #include "harness/cli/file_names.h"
 #include "harness/cli/plan_options.h"
+#include "harness/cli/value_kind.h"
 #include "harness/flow/calibrate.h"
 #include "harness/flow/characterize.h"
 #include "harness/sim/worker_pool.h"
@@ -150,6 +151,7 @@ Command DeckCommand() {
             const auto options = std::make_shared<Options>();
             AddPlanOptions(app, options->plan);
             app.add_option("-o,--out", options->folder, "folder to write to")
+                ->type_name(kFolder)
                 ->required();
             return [options] { return Deck(*options); };
           }};

@@ -6,6 +6,7 @@
 #include <unistd.h>
 
 #include "harness/cli/commands.h"
+#include "harness/cli/value_kind.h"
 #include "harness/flow/prepared_run.h"
 #include "harness/report/estimate_table.h"
 
@@ -48,10 +49,12 @@ Command EstimateCommand() {
                            options->cells,
                            "netlist files, or built-in cells by name (* and ? "
                            "allowed)")
+                ->type_name(kCell)
                 ->required();
             app.add_option("--node",
                            options->node,
-                           "built-in node or a node file (default: p45)");
+                           "built-in node or a node file (default: p45)")
+                ->type_name(kNode);
             app.add_flag("--all-side-vectors",
                          options->all_side_vectors,
                          "list every side vector, not only the worst");

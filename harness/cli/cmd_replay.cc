@@ -13,9 +13,9 @@
 #include "harness/base/file.h"
 #include "harness/base/text.h"
 #include "harness/cli/commands.h"
+#include "harness/cli/value_kind.h"
 #include "harness/report/replay_table.h"
-#include "harness/sim/job_list.h"
-#include "harness/sim/pool_worker.h"
+#include "harness/sim/replay.h"
 #include "harness/sim/worker_pool.h"
 #include "harness/store/store.h"
 
@@ -81,16 +81,6 @@ Result<size_t> RungOf(const Options& options, const StoredJob& stored) {
   return static_cast<size_t>(rung);
 }
 
-// The job without its other rungs, and with the time that this one is given.
-Job OnlyRung(const Job& job, size_t rung) {
-  Job alone = job;
-  alone.time_limit_s = TimeLimitOf({.job = job, .rung = rung});
-  if (!job.settings.empty()) {
-    alone.settings = {job.settings[rung]};
-  }
-  return alone;
-}
-
 // One attempt, whatever becomes of its worker.
 Result<Outcome> Simulate(Job job) {
   PoolOptions options;
@@ -100,16 +90,9 @@ Result<Outcome> Simulate(Job job) {
   if (!pool.ok()) {
     return Forward(pool);
   }
-  std::vector<Job> jobs;
-  jobs.push_back(std::move(job));
-  JobList list(std::move(jobs));
-  Outcome again;
-  const Status ran =
-      pool->Run(list, [&](const Job& /*job*/, const Outcome& outcome) {
-        again = outcome;
-        return Ok();
-      });
-  return ran.ok() ? Result<Outcome>(std::move(again)) : Forward(ran);
+  Result<std::vector<Outcome>> again = SimulateAgain({std::move(job)}, &*pool);
+  return again.ok() ? Result<Outcome>(std::move(again->front()))
+                    : Forward(again);
 }
 
 Result<ExitCode> Replay(const Options& options) {
@@ -151,14 +134,16 @@ Command ReplayCommand() {
                 ->required();
             app.add_option("--store",
                            options->store,
-                           "file that keeps the job (default: gatedyno.db)");
+                           "file that keeps the job (default: gatedyno.db)")
+                ->type_name(kFile);
             app.add_option("--rung",
                            options->rung,
                            "which of its simulator settings, from 0 (default: "
                            "those it ended with)");
             app.add_option("--deck",
                            options->deck,
-                           "write the deck to this file instead of running it");
+                           "write the deck to this file instead of running it")
+                ->type_name(kFile);
             return [options] { return Replay(*options); };
           }};
 }

@@ -11,6 +11,7 @@
 #include "harness/cli/commands.h"
 #include "harness/cli/farm_options.h"
 #include "harness/cli/interrupt.h"
+#include "harness/cli/local_date.h"
 #include "harness/cli/plan_options.h"
 #include "harness/cli/run_options.h"
 #include "harness/cli/run_session.h"
@@ -38,7 +39,8 @@ Status WriteReports(const RunOptions& options, const RunResult& result) {
       return written;
     }
   }
-  return options.csv ? WriteFile(*options.csv, CsvReport(result)) : Ok();
+  return options.csv ? WriteFile(*options.csv, CsvReport(result, LocalDate()))
+                     : Ok();
 }
 
 ExitCode Judge(const RunResult& result) {
@@ -129,7 +131,8 @@ Result<ExitCode> Run(const Options& options) {
   if (!result.ok()) {
     return Forward(result);
   }
-  fmt::print("{}", RunTable(*result, Style(TakesColour(STDOUT_FILENO))));
+  fmt::print("{}",
+             RunTable(*result, Style(TakesColour(STDOUT_FILENO)), LocalDate()));
   PrintJobs(*result, options.run.store);
   const Status written = WriteReports(options.run, *result);
   if (!written.ok()) {

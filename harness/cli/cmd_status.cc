@@ -7,6 +7,7 @@
 #include <unistd.h>
 
 #include "harness/cli/commands.h"
+#include "harness/cli/value_kind.h"
 #include "harness/report/status_table.h"
 #include "harness/store/run_lock.h"
 #include "harness/store/store.h"
@@ -57,15 +58,16 @@ Result<ExitCode> Show(const Options& options) {
 }  // namespace
 
 Command StatusCommand() {
-  return {
-      "status",
-      "show how far the runs of a store are",
-      [](CLI::App& app) -> Action {
-        const auto options = std::make_shared<Options>();
-        app.add_option("store", options->store, "file of the runs")->required();
-        app.add_flag("--json", options->json, "show it as JSON");
-        return [options] { return Show(*options); };
-      }};
+  return {"status",
+          "show how far the runs of a store are",
+          [](CLI::App& app) -> Action {
+            const auto options = std::make_shared<Options>();
+            app.add_option("store", options->store, "file of the runs")
+                ->type_name(kFile)
+                ->required();
+            app.add_flag("--json", options->json, "show it as JSON");
+            return [options] { return Show(*options); };
+          }};
 }
 
 }  // namespace gatedyno

@@ -8,8 +8,24 @@ std::vector<Command> Commands() {
           DeckCommand(),
           StatusCommand(),
           ReportCommand(),
+          ReleaseCommand(),
+          VersusCommand(),
           ReplayCommand(),
-          TaskCommand()};
+          TaskCommand(),
+          CompleteCommand(),
+          ManualCommand()};
+}
+
+std::vector<AddedCommand> AddCommands(CLI::App& program) {
+  std::vector<AddedCommand> added;
+  for (const Command& command : Commands()) {
+    CLI::App* app = program.add_subcommand(command.name, command.summary);
+    if (command.hidden) {
+      app->group("");
+    }
+    added.push_back({app, command.add(*app)});
+  }
+  return added;
 }
 
 }  // namespace gatedyno

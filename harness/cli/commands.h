@@ -27,13 +27,25 @@ struct Command {
 
 std::vector<Command> Commands();
 
+struct AddedCommand {
+  CLI::App* app;
+  Action action;
+};
+
+// Gives the program its commands, of the table.
+std::vector<AddedCommand> AddCommands(CLI::App& program);
+
 Command EstimateCommand();  // cmd_estimate.cc
 Command DeckCommand();      // cmd_deck.cc
 Command RunCommand();       // cmd_run.cc
 Command StatusCommand();    // cmd_status.cc
 Command ReplayCommand();    // cmd_replay.cc
 Command ReportCommand();    // cmd_report.cc
+Command ReleaseCommand();   // cmd_release.cc
+Command VersusCommand();    // cmd_versus.cc
 Command TaskCommand();      // cmd_task.cc
+Command CompleteCommand();  // cmd_complete.cc
+Command ManualCommand();    // cmd_manual.cc
 
 }  // namespace gatedyno
 

@@ -8,9 +8,10 @@
 namespace gatedyno {
 
 enum ExitCode : int {
-  kAllWithin = 0,       // Everything asked for was done, and is within.
+  kAllWithin = 0,       // Everything asked for was done, and is within; of a
+                        // release: yes.
   kSomeBeyond = 1,      // Measured, and somewhere beyond the tolerance or too
-                        // uncertain to tell.
+                        // uncertain to tell; of a release: no.
   kBadUsage = 2,        // An option, netlist, node or plan is wrong.
   kNotAllMeasured = 3,  // Jobs that could not be measured.
   kOwnFault = 4,        // Ours, or the system's.

@@ -2,6 +2,8 @@
 
 #include <fmt/format.h>
 
+#include "harness/cli/value_kind.h"
+
 namespace gatedyno {
 
 void AddFarmOptions(CLI::App& app, FarmCliOptions& options) {
@@ -12,7 +14,8 @@ void AddFarmOptions(CLI::App& app, FarmCliOptions& options) {
       ->check(CLI::IsMember({"slurm"}));
   app.add_option("--farm-folder",
                  options.folder,
-                 "folder that this machine and all nodes know by this name");
+                 "folder that this machine and all nodes know by this name")
+      ->type_name(kFolder);
   app.add_option("--farm-jobs",
                  options.jobs_per_task,
                  "jobs a task, some minutes of work (default: 500)")

@@ -56,15 +56,10 @@ int PrintVersion() {
   return kAllWithin;
 }
 
-struct Entry {
-  CLI::App* app;
-  Action action;
-};
-
-int RunChosen(const std::vector<Entry>& entries) {
-  for (const Entry& entry : entries) {
-    if (entry.app->parsed()) {
-      const Result<ExitCode> done = entry.action();
+int RunChosen(const std::vector<AddedCommand>& commands) {
+  for (const AddedCommand& command : commands) {
+    if (command.app->parsed()) {
+      const Result<ExitCode> done = command.action();
       return done.ok() ? *done : Complain(done.error());
     }
   }
@@ -82,14 +77,7 @@ int Main(int argc, char** argv) {
       "Exit codes: 0 all within, 1 some beyond, 2 bad input, 3 jobs "
       "that could not be measured,\n4 a fault of ours or the system's, 5 "
       "stopped by Ctrl-C.");
-  std::vector<Entry> entries;
-  for (const Command& command : Commands()) {
-    CLI::App* sub = app.add_subcommand(command.name, command.summary);
-    if (command.hidden) {
-      sub->group("");
-    }
-    entries.push_back({sub, command.add(*sub)});
-  }
+  const std::vector<AddedCommand> commands = AddCommands(app);
   app.require_subcommand(0, 1);
   try {
     app.parse(argc, argv);
@@ -106,7 +94,7 @@ int Main(int argc, char** argv) {
     fmt::print("{}", app.help());
     return kBadUsage;
   }
-  return RunChosen(entries);
+  return RunChosen(commands);
 }
 
 // Nothing is well that did not reach its reader: a full disk shows only here.

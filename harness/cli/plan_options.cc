@@ -4,6 +4,8 @@
 
 #include <fmt/format.h>
 
+#include "harness/cli/value_kind.h"
+
 namespace gatedyno {
 namespace {
 
@@ -43,14 +45,17 @@ void AddPlanOptions(CLI::App& app, PlanOptions& options) {
                  options.what,
                  "PLAN.json, or cells: netlist files, or built-in cells by "
                  "name (* and ? allowed)")
+      ->type_name(kPlanOrCell)
       ->required();
   app.add_option("--node",
                  options.node,
-                 "built-in node or a node file (default: p45, or the plan's)");
+                 "built-in node or a node file (default: p45, or the plan's)")
+      ->type_name(kNode);
   app.add_option("--corner",
                  options.corners,
                  "corner of the node by name (* and ? allowed), repeatable "
                  "(default: its first)")
+      ->type_name(kCorner)
       ->allow_extra_args(false);
   app.add_option("--fanouts",
                  options.fanouts,
@@ -67,10 +72,12 @@ void AddPlanOptions(CLI::App& app, PlanOptions& options) {
                "measure every side vector, not only the worst by hand numbers");
   app.add_option("--allow-g",
                  options.effort_tolerance,
-                 "allowed difference of g, relative: 0.25");
+                 "allowed difference of g, relative: 0.25; rules of the plan "
+                 "keep theirs");
   app.add_option("--allow-p",
                  options.parasitic_tolerance,
-                 "allowed difference of p, relative: 0.35");
+                 "allowed difference of p, relative: 0.35; rules of the plan "
+                 "keep theirs");
 }
 
 Result<Plan> PlanOf(const PlanOptions& options) {

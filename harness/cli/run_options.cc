@@ -1,18 +1,24 @@
 #include "harness/cli/run_options.h"
 
+#include "harness/cli/value_kind.h"
+
 namespace gatedyno {
 
 void AddRunOptions(CLI::App& app, RunOptions& options) {
   constexpr int kMostWorkers = 1024;
   app.add_option("--store",
                  options.store,
-                 "file that keeps every outcome (default: gatedyno.db)");
+                 "file that keeps every outcome (default: gatedyno.db)")
+      ->type_name(kFile);
   app.add_option("--reuse",
                  options.reuse,
                  "another store whose measured jobs are taken, repeatable")
+      ->type_name(kFile)
       ->allow_extra_args(false);
-  app.add_option("--json", options.json, "write the run as JSON");
-  app.add_option("--csv", options.csv, "write the run as CSV");
+  app.add_option("--json", options.json, "write the run as JSON")
+      ->type_name(kFile);
+  app.add_option("--csv", options.csv, "write the run as CSV")
+      ->type_name(kFile);
   app.add_option("--workers",
                  options.workers,
                  "simulator processes (default: one a processor)")

@@ -1,15 +1,14 @@
 #include "harness/compare/compare.h"
 
 #include <algorithm>
-#include <array>
 #include <cassert>
 #include <cmath>
+#include <iterator>
 #include <optional>
-#include <string_view>
-#include <utility>
 
 #include <fmt/format.h>
 
+#include "harness/compare/figure.h"
 #include "harness/fit/coverage.h"
 #include "harness/fit/line_fit.h"
 #include "harness/fit/linearity.h"
@@ -18,15 +17,6 @@
 
 namespace gatedyno {
 namespace {
-
-// One of the two figures of an arc that the hand method predicts.
-struct Figure {
-  std::string_view symbol;  // "g", "p".
-  Measured measured;
-  double hand = 0.0;
-  Measured difference;  // (measured - hand) / hand.
-  double tolerance = 0.0;
-};
 
 std::string FirstFailure(const std::vector<std::string>& failures) {
   if (failures.size() == 1) {
@@ -50,27 +40,6 @@ Measured Difference(const Measured& measured, const Measured& hand) {
   return difference;
 }
 
-std::string DescribeBeyond(const Figure& figure) {
-  return fmt::format(
-      "{} {:.2f} against {:.2f} by hand: {:+.1f} % (allowed {:g} "
-      "%)",
-      figure.symbol,
-      figure.measured.value,
-      figure.hand,
-      100.0 * figure.difference.value,
-      100.0 * figure.tolerance);
-}
-
-std::string DescribeUncertain(const Figure& figure, double expanded) {
-  return fmt::format(
-      "{} is too uncertain to tell: {:+.1f} % with an "
-      "uncertainty of {:.1f} % (allowed {:g} %)",
-      figure.symbol,
-      100.0 * figure.difference.value,
-      100.0 * expanded,
-      100.0 * figure.tolerance);
-}
-
 void AppendReason(Comparison& comparison, const std::string& reason) {
   if (!comparison.reason.empty()) {
     comparison.reason += "; ";
@@ -78,33 +47,31 @@ void AppendReason(Comparison& comparison, const std::string& reason) {
   comparison.reason += reason;
 }
 
-double Expanded(const Figure& figure, double coverage) {
-  assert(figure.difference.u.has_value());
-  return coverage * figure.difference.u.value_or(0.0);
-}
-
 // Beyond on either figure outweighs doubt about the other.
-void Judge(const Figure& figure, double coverage, Comparison& comparison) {
-  const double expanded = Expanded(figure, coverage);
-  const bool beyond =
-      std::abs(figure.difference.value) - expanded > figure.tolerance;
+void Judge(const Figure& figure, Comparison& comparison) {
+  const bool beyond = IsBeyond(figure);
   if (beyond && comparison.verdict != Verdict::kBeyond) {
     comparison.verdict = Verdict::kBeyond;
     comparison.reason.clear();
   }
   if (beyond) {
     AppendReason(comparison, DescribeBeyond(figure));
-  } else if (expanded > figure.tolerance &&
-             comparison.verdict != Verdict::kBeyond) {
+  } else if (IsTooUncertain(figure) && comparison.verdict != Verdict::kBeyond) {
     comparison.verdict = Verdict::kNotMeasured;
-    AppendReason(comparison, DescribeUncertain(figure, expanded));
+    AppendReason(comparison, DescribeTooUncertain(figure));
   }
 }
 
-// Fills in what the line says and returns both figures.
-std::array<Figure, 2> Measure(const Calibration& calibration,
-                              double delay_u_relative,
-                              Comparison& comparison) {
+std::optional<double> Expanded(const Measured& difference, int points) {
+  return difference.u
+             ? std::optional(CoverageFactor(points - 2) * *difference.u)
+             : std::nullopt;
+}
+
+// Fills in what the line says.
+void Measure(const Calibration& calibration,
+             double delay_u_relative,
+             Comparison& comparison) {
   const Line& line = *comparison.line;
   const Normalised normalised =
       Normalise(line, comparison.arc.edge, calibration);
@@ -117,23 +84,14 @@ std::array<Figure, 2> Measure(const Calibration& calibration,
           .bent;
 
   const Measured hand_effort{comparison.estimate.effort, 0.0};
-  const Measured effort_difference = Difference(normalised.effort, hand_effort);
-  const Measured hand_parasitic =
-      HandParasitic(comparison.estimate, calibration.p_inv);
-  const Measured parasitic_difference =
-      Difference(normalised.parasitic, hand_parasitic);
-  comparison.effort_difference = effort_difference.value;
-  comparison.parasitic_difference = parasitic_difference.value;
-  return {Figure{"g",
-                 normalised.effort,
-                 hand_effort.value,
-                 effort_difference,
-                 comparison.tolerance.effort},
-          Figure{"p",
-                 normalised.parasitic,
-                 hand_parasitic.value,
-                 parasitic_difference,
-                 comparison.tolerance.parasitic}};
+  const Measured effort = Difference(normalised.effort, hand_effort);
+  const Measured parasitic =
+      Difference(normalised.parasitic,
+                 HandParasitic(comparison.estimate, calibration.p_inv));
+  comparison.effort_difference = effort.value;
+  comparison.parasitic_difference = parasitic.value;
+  comparison.effort_difference_expanded = Expanded(effort, line.points);
+  comparison.parasitic_difference_expanded = Expanded(parasitic, line.points);
 }
 
 // Everything but what a line says.
@@ -155,45 +113,40 @@ Comparison WithoutLine(const MeasuredArc& measured,
   return comparison;
 }
 
-// What there is to judge, or why there is nothing.
-struct Judgement {
-  Comparison comparison;
-  std::optional<std::array<Figure, 2>> figures;
-};
-
-Judgement Prepare(const MeasuredArc& measured,
-                  const Calibration& calibration,
-                  const Tolerance& tolerance,
-                  double delay_u_relative) {
-  Judgement judgement{WithoutLine(measured, calibration, tolerance), {}};
-  Comparison& comparison = judgement.comparison;
+// What there is to judge, or, as the reason, why there is nothing.
+Comparison Prepare(const MeasuredArc& measured,
+                   const Calibration& calibration,
+                   const Tolerance& tolerance,
+                   double delay_u_relative) {
+  Comparison comparison = WithoutLine(measured, calibration, tolerance);
   if (!measured.failures.empty()) {
     comparison.reason = FirstFailure(measured.failures);
-    return judgement;
+    return comparison;
   }
   const Result<Line> line = FitLine(measured.points, delay_u_relative);
   if (!line.ok()) {
     comparison.reason = line.error().message;
-    return judgement;
+    return comparison;
   }
   if (calibration.p_inv.value <= 0.0) {
     comparison.reason = fmt::format(
         "p_inv of the reference inverter is {:.2f}: p by hand needs one above "
         "zero",
         calibration.p_inv.value);
-    return judgement;
+    return comparison;
   }
   comparison.line = *line;
-  const auto figures = Measure(calibration, delay_u_relative, comparison);
-  if (!figures[0].difference.u || !figures[1].difference.u) {
+  Measure(calibration, delay_u_relative, comparison);
+  if (!comparison.effort_difference_expanded ||
+      !comparison.parasitic_difference_expanded) {
     comparison.reason =
         "uncertainty unknown: needs three points or more, of the arc and of "
         "the reference inverter";
-    return judgement;
   }
-  judgement.figures = figures;
-  return judgement;
+  return comparison;
 }
+
+constexpr Quantity kQuantities[] = {Quantity::kEffort, Quantity::kParasitic};
 
 }  // namespace
 
@@ -201,35 +154,31 @@ Comparison Compare(const MeasuredArc& measured,
                    const Calibration& calibration,
                    const Tolerance& tolerance,
                    double delay_u_relative) {
-  Judgement judgement =
+  Comparison comparison =
       Prepare(measured, calibration, tolerance, delay_u_relative);
-  Comparison& comparison = judgement.comparison;
-  if (judgement.figures) {
+  if (comparison.reason.empty()) {
     comparison.verdict = Verdict::kWithin;
-    const double coverage = CoverageFactor(comparison.line->points - 2);
-    for (const Figure& figure : *judgement.figures) {
-      Judge(figure, coverage, comparison);
+    for (const Quantity quantity : kQuantities) {
+      Judge(FigureOf(comparison, quantity), comparison);
     }
   }
-  return std::move(comparison);
+  return comparison;
 }
 
 bool IsCloseCall(const MeasuredArc& measured,
                  const Calibration& calibration,
                  const Tolerance& tolerance,
                  double delay_u_relative) {
-  const Judgement judgement =
+  const Comparison comparison =
       Prepare(measured, calibration, tolerance, delay_u_relative);
-  if (!judgement.figures) {
-    return false;
-  }
-  const double coverage = CoverageFactor(judgement.comparison.line->points - 2);
-  return std::any_of(judgement.figures->begin(),
-                     judgement.figures->end(),
-                     [&](const Figure& figure) {
+  return comparison.reason.empty() &&
+         std::any_of(std::begin(kQuantities),
+                     std::end(kQuantities),
+                     [&comparison](Quantity quantity) {
+                       const Figure figure = FigureOf(comparison, quantity);
                        const double margin =
-                           figure.tolerance - std::abs(figure.difference.value);
-                       return std::abs(margin) < Expanded(figure, coverage);
+                           figure.tolerance - std::abs(figure.difference);
+                       return std::abs(margin) < figure.expanded.value_or(0.0);
                      });
 }
 

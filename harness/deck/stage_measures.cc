@@ -55,6 +55,12 @@ void AddStageMeasures(bool inverting, double supply_v, Job& job) {
   }
 }
 
+std::array<std::string, 3> IntervalNames(const Arc& arc) {
+  return {Name("delay", arc.edge),
+          Name("input", arc.input_edge),
+          Name("output", arc.edge)};
+}
+
 std::string MeasureLines(const Job& job) {
   std::string text;
   for (const Interval& interval : job.intervals) {
@@ -71,12 +77,12 @@ double DelayOf(const Outcome& outcome, Edge edge) {
 }
 
 Point PointOf(const Outcome& outcome, const Arc& arc, double fanout) {
-  return {
-      .fanout = fanout,
-      .delay_s = DelayOf(outcome, arc.edge),
-      .input_transition_s = outcome.values_s.at(Name("input", arc.input_edge)),
-      .output_transition_s = outcome.values_s.at(Name("output", arc.edge)),
-      .job_key = {}};
+  const auto [delay, input, output] = IntervalNames(arc);
+  return {.fanout = fanout,
+          .delay_s = outcome.values_s.at(delay),
+          .input_transition_s = outcome.values_s.at(input),
+          .output_transition_s = outcome.values_s.at(output),
+          .job_key = {}};
 }
 
 }  // namespace gatedyno

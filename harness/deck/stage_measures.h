@@ -6,6 +6,7 @@
 #ifndef GATEDYNO_DECK_STAGE_MEASURES_H_
 #define GATEDYNO_DECK_STAGE_MEASURES_H_
 
+#include <array>
 #include <string>
 
 #include "harness/record/arc.h"
@@ -21,6 +22,10 @@ inline constexpr const char* kOutputNet = "d_out";
 
 // Adds intervals and swing checks for an arc that inverts, or does not.
 void AddStageMeasures(bool inverting, double supply_v, Job& job);
+
+// Names of the intervals that an arc's point is read from: its delay, then the
+// transitions of its input and of its output.
+std::array<std::string, 3> IntervalNames(const Arc& arc);
 
 // The intervals as .meas lines, for whoever runs the deck by hand.
 std::string MeasureLines(const Job& job);

@@ -14,16 +14,18 @@
 #include "harness/flow/accuracy_sample.h"
 #include "harness/flow/arc_measurement.h"
 #include "harness/flow/calibrate.h"
+#include "harness/flow/cell_circuit.h"
 
 namespace gatedyno {
 namespace {
 
-CellSummary SummaryOf(const CellEstimate& estimate) {
+CellSummary SummaryOf(const Cell& cell, const CellEstimate& estimate) {
   CellSummary summary{.name = estimate.cell,
                       .functions = {},
                       .stages = estimate.stages,
                       .tallest_pull_down = 0,
-                      .tallest_pull_up = 0};
+                      .tallest_pull_up = 0,
+                      .circuit = CircuitOf(cell)};
   for (const OutputEstimate& output : estimate.outputs) {
     summary.functions.push_back(
         fmt::format("{} = {}", output.output, output.function));
@@ -35,6 +37,12 @@ CellSummary SummaryOf(const CellEstimate& estimate) {
   return summary;
 }
 
+Tolerance AllowedFor(const Plan& plan,
+                     const Arc& arc,
+                     const std::string& corner) {
+  return ToleranceFor(arc, corner, plan.tolerance, plan.tolerance_rules);
+}
+
 RunResult StartResult(const PreparedRun& run, const std::string& simulator) {
   RunResult result;
   result.facts = {.title = run.plan.title,
@@ -44,11 +52,13 @@ RunResult StartResult(const PreparedRun& run, const std::string& simulator) {
                   .fanouts = run.plan.fanouts,
                   .accuracy = run.plan.accuracy,
                   .tolerance = run.plan.tolerance,
+                  .tolerance_rules = run.plan.tolerance_rules,
+                  .exemptions = run.plan.exemptions,
                   .program = {},
                   .simulator = simulator,
                   .started = {}};
-  for (const CellEstimate& estimate : run.estimates) {
-    result.cells.push_back(SummaryOf(estimate));
+  for (size_t i = 0; i < run.cells.size(); ++i) {
+    result.cells.push_back(SummaryOf(run.cells[i], run.estimates[i]));
   }
   result.warnings = run.warnings;
   return result;
@@ -65,7 +75,7 @@ void AddUnmeasured(const PreparedRun& run,
       row.arc = arc.arc;
       row.corner = corner.name;
       row.estimate = arc.estimate;
-      row.tolerance = run.plan.tolerance;
+      row.tolerance = AllowedFor(run.plan, arc.arc, corner.name);
       row.reason = reason;
       result->comparisons.push_back(row);
     }
@@ -110,12 +120,13 @@ class ArcSweep {
     next_ = (next_ + 1) % places_.size();
     context_.bench = &benches_.at(place.calibration->corner.name);
     context_.calibration = place.calibration;
-    context_.tolerance = run_.plan.tolerance;
     size_t arc = place.first_arc;
     for (const StageTest& test :
          ArcTests(run_, place.cell, *place.calibration)) {
       MeasuredArc& measured = measured_[arc++];
       ++arcs_asked_;
+      context_.tolerance =
+          AllowedFor(run_.plan, test.arc, place.calibration->corner.name);
       MeasureArc(context_, test, [this, &measured](MeasuredArc ended) {
         measured = std::move(ended);
         ++progress().arcs_ended;
@@ -171,7 +182,10 @@ void AddCorner(const PreparedRun& run,
   result->calibrations.push_back(calibration);
   for (const MeasuredArc& arc : arcs) {
     result->comparisons.push_back(
-        Compare(arc, calibration, run.plan.tolerance, delay_u_relative));
+        Compare(arc,
+                calibration,
+                AllowedFor(run.plan, arc.arc, calibration.corner.name),
+                delay_u_relative));
   }
 }
 

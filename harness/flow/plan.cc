@@ -1,11 +1,14 @@
 #include "harness/flow/plan.h"
 
 #include <set>
+#include <utility>
 
 #include <fmt/format.h>
 
 #include "harness/base/install.h"
+#include "harness/flow/agreement.h"
 #include "harness/node/json_file.h"
+#include "harness/record/agreement_json.h"
 
 namespace gatedyno {
 namespace {
@@ -38,7 +41,8 @@ Result<Plan> LoadPlan(const std::filesystem::path& path) {
   plan.tolerance.parasitic =
       tolerances.value("parasitic", plan.tolerance.parasitic);
   plan.folder = path.parent_path();
-  return plan;
+  const Status agreed = ReadAgreement(in, path.string(), &plan);
+  return agreed.ok() ? Result<Plan>(std::move(plan)) : Forward(agreed);
 }
 
 json PlanToJson(const Plan& plan) {
@@ -57,6 +61,12 @@ json PlanToJson(const Plan& plan) {
   }
   if (!plan.fanouts.empty()) {
     out["fanouts"] = plan.fanouts;
+  }
+  if (!plan.tolerance_rules.empty()) {
+    out["tolerances"]["rules"] = ToleranceRulesToJson(plan.tolerance_rules);
+  }
+  if (!plan.exemptions.empty()) {
+    out["exemptions"] = ExemptionsToJson(plan.exemptions);
   }
   return out;
 }

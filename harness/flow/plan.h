@@ -13,6 +13,7 @@
 #include "harness/base/result.h"
 #include "harness/deck/sim_settings.h"
 #include "harness/record/comparison.h"
+#include "harness/record/exemption.h"
 
 namespace gatedyno {
 
@@ -26,6 +27,8 @@ struct Plan {
   Drive drive = Drive::kMatched;
   bool all_side_vectors = false;
   Tolerance tolerance;
+  std::vector<ToleranceRule> tolerance_rules;
+  std::vector<Exemption> exemptions;
   // Wall clock for one job, in place of an estimate.  Not part of a plan file:
   // it changes no number.
   std::optional<double> time_limit_s;
@@ -36,7 +39,9 @@ struct Plan {
 // Fails with the JSON pointer of what is wrong.
 Result<Plan> LoadPlan(const std::filesystem::path& path);
 
-// As a plan file would say it; what the store keeps of a run.
+// As a plan file would say it; what the store keeps of a run.  Rules and
+// exemptions are in it only where there are some: a run of a plan without goes
+// on with what an older gatedyno began.
 nlohmann::json PlanToJson(const Plan& plan);
 
 // Refuses what the schema refuses, for a plan made from command-line options:

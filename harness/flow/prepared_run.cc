@@ -1,10 +1,12 @@
 #include "harness/flow/prepared_run.h"
 
 #include <system_error>
+#include <utility>
 
 #include <fmt/format.h>
 #include <fnmatch.h>
 
+#include "harness/flow/agreement_warnings.h"
 #include "harness/flow/cell_set.h"
 #include "harness/flow/width_warnings.h"
 
@@ -94,6 +96,9 @@ Result<PreparedRun> PrepareRun(const Plan& plan) {
   const Status estimated = EstimateAll(&run);
   if (!estimated.ok()) {
     return Forward(estimated);
+  }
+  for (std::string& warning : AgreementWarnings(run)) {
+    run.warnings.push_back(std::move(warning));
   }
   return run;
 }

@@ -20,7 +20,8 @@ struct PreparedRun {
   std::vector<Corner> corners;
   std::vector<Cell> cells;
   std::vector<CellEstimate> estimates;  // Of cells, same order.
-  std::vector<std::string> warnings;    // Each begins with its cell.
+  // Each begins with its cell, or its place in the plan.
+  std::vector<std::string> warnings;
 };
 
 Result<PreparedRun> PrepareRun(const Plan& plan);

@@ -27,6 +27,8 @@
 namespace gatedyno {
 
 struct DeskOptions {
+  // Nothing is saved: for a runner that has its outcomes from the store.
+  bool read_only = false;
   // Stores that are read before a job is simulated; they outlive the desk.
   std::vector<Store*> reuse = {};
   // Once true, no further job is given out.

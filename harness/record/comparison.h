@@ -11,6 +11,7 @@
 #include "harness/record/arc.h"
 #include "harness/record/corner.h"
 #include "harness/record/line.h"
+#include "harness/record/tolerance.h"
 
 namespace gatedyno {
 
@@ -33,20 +34,6 @@ struct Calibration {
   double fo4_s = 0.0;  // Mean delay at h = 4.
 };
 
-// What is allowed between hand and measured, relative to the hand number.
-//
-// The defaults are the spread of ordinary gates, so that "beyond" marks an arc
-// that strays further than they do.  Effort: ten gates of a published 0.13 um
-// cell data book (2005-08) lie 11.5 % below the ideal on average, standard
-// deviation 5.8 %, worst 22.5 % (a four-high NAND); mean plus two deviations is
-// 23 %.  Parasitic: two-input NANDs on public cards of five nodes come out
-// between 26 % below and 14 % above the node count, by input (our own trials),
-// and counting the internal nets of a three-high stack adds a third.
-struct Tolerance {
-  double effort = 0.25;
-  double parasitic = 0.35;
-};
-
 // One row of the table.
 struct Comparison {
   Arc arc;
@@ -61,6 +48,9 @@ struct Comparison {
   double hand_parasitic = 0.0;     // p by nodes, in tau; see compare.h.
   double effort_difference = 0.0;  // (measured - hand) / hand.
   double parasitic_difference = 0.0;
+  // What the verdict allows for, U of compare/compare.h; none when unknown.
+  std::optional<double> effort_difference_expanded = std::nullopt;
+  std::optional<double> parasitic_difference_expanded = std::nullopt;
   bool bent = false;  // A line does not describe the points.
   Verdict verdict = Verdict::kNotMeasured;
   std::string reason;  // Why not measured, or what is beyond.

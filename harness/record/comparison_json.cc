@@ -32,6 +32,11 @@ std::optional<double> ReadOptional(const json& from, const char* field) {
                          : std::optional<double>(value.get<double>());
 }
 
+// Of a field that an older gatedyno did not write.
+std::optional<double> ReadIfThere(const json& from, const char* field) {
+  return from.contains(field) ? ReadOptional(from, field) : std::nullopt;
+}
+
 double ReadNumber(const json& from, const char* field) {
   return ReadOptional(from, field)
       .value_or(std::numeric_limits<double>::quiet_NaN());
@@ -184,6 +189,10 @@ Comparison ReadComparison(const json& from) {
     comparison.parasitic = ReadMeasured(from, "parasitic");
     comparison.effort_difference = ReadNumber(from, "effort_difference");
     comparison.parasitic_difference = ReadNumber(from, "parasitic_difference");
+    comparison.effort_difference_expanded =
+        ReadIfThere(from, "effort_difference_expanded");
+    comparison.parasitic_difference_expanded =
+        ReadIfThere(from, "parasitic_difference_expanded");
   }
   comparison.bent = from.at("bent").get<bool>();
   comparison.verdict = ReadVerdict(from, "verdict");
@@ -236,6 +245,10 @@ json ComparisonToJson(const Comparison& comparison) {
       {"hand_parasitic", Write(comparison.hand_parasitic)},
       {"effort_difference", if_measured(comparison.effort_difference)},
       {"parasitic_difference", if_measured(comparison.parasitic_difference)},
+      {"effort_difference_expanded",
+       if_measured(comparison.effort_difference_expanded)},
+      {"parasitic_difference_expanded",
+       if_measured(comparison.parasitic_difference_expanded)},
       {"bent", comparison.bent},
       {"verdict", VerdictName(comparison.verdict)},
       {"reason", comparison.reason},

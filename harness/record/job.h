@@ -55,6 +55,9 @@ struct Job {
   double stop_s = 0.0;  // The last time point the deck must reach.
   // Wall clock, before the worker is killed; for the first rung.
   double time_limit_s = 60.0;
+  // The outcome shall hold what the nets did.  Changes no number, and is not
+  // part of the key.
+  bool wants_waves = false;
 
   bool operator==(const Job&) const = default;
 };

@@ -44,6 +44,9 @@ static void from_json(const nlohmann::json& json, Ending& ending) {
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(Crossing, net, level_v, edge, occurrence)
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(Interval, name, from, to)
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(SwingCheck, net, low_v, high_v)
+NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(Waveform, net, time_s, voltage_v)
+NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(TimedInterval, name, from_s, to_s)
+NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(Waves, waveforms, intervals)
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(
     Job, key, label, deck, settings, intervals, swings, stop_s, time_limit_s)
 NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(
@@ -51,11 +54,17 @@ NLOHMANN_DEFINE_TYPE_NON_INTRUSIVE(
 
 namespace {
 
+// Fields that are there only for who asks for waves.
+constexpr const char* kWantsWaves = "wants_waves";
+constexpr const char* kWaves = "waves";
+
 // A missing, mistyped or unknown field is reported by exception only.
-template <class T>
-Result<T> Read(const nlohmann::json& json, const char* what) {
+template <class T, class Rest>
+Result<T> Read(const nlohmann::json& json, const char* what, const Rest& rest) {
   try {
-    return json.get<T>();
+    T read = json.get<T>();
+    rest(read);
+    return read;
   } catch (const std::exception& thrown) {
     return Internal(fmt::format("not a {}: {}", what, thrown.what()));
   }
@@ -64,19 +73,33 @@ Result<T> Read(const nlohmann::json& json, const char* what) {
 }  // namespace
 
 nlohmann::json JobToJson(const Job& job) {
-  return job;
+  nlohmann::json json = job;
+  if (job.wants_waves) {
+    json[kWantsWaves] = true;
+  }
+  return json;
 }
 
 Result<Job> JobFromJson(const nlohmann::json& json) {
-  return Read<Job>(json, "job");
+  return Read<Job>(json, "job", [&json](Job& job) {
+    job.wants_waves = json.value(kWantsWaves, false);
+  });
 }
 
 nlohmann::json OutcomeToJson(const Outcome& outcome) {
-  return outcome;
+  nlohmann::json json = outcome;
+  if (outcome.waves) {
+    json[kWaves] = *outcome.waves;
+  }
+  return json;
 }
 
 Result<Outcome> OutcomeFromJson(const nlohmann::json& json) {
-  return Read<Outcome>(json, "job's outcome");
+  return Read<Outcome>(json, "job's outcome", [&json](Outcome& outcome) {
+    if (json.contains(kWaves)) {
+      outcome.waves = json.at(kWaves).get<Waves>();
+    }
+  });
 }
 
 }  // namespace gatedyno

@@ -4,8 +4,11 @@
 #define GATEDYNO_RECORD_OUTCOME_H_
 
 #include <map>
+#include <optional>
 #include <string>
 #include <string_view>
+
+#include "harness/record/waveform.h"
 
 namespace gatedyno {
 
@@ -19,6 +22,7 @@ struct Outcome {
   std::string message;
   double simulator_s = 0.0;  // Processor time spent inside the simulator.
   int rung = 0;              // Of Job::settings, in the attempt that ended it.
+  std::optional<Waves> waves = std::nullopt;  // Asked for, and measured.
 
   bool measured() const { return ending == Ending::kMeasured; }
 };

@@ -7,7 +7,9 @@
 #include <vector>
 
 #include "harness/record/accuracy_check.h"
+#include "harness/record/circuit.h"
 #include "harness/record/comparison.h"
+#include "harness/record/exemption.h"
 
 namespace gatedyno {
 
@@ -18,6 +20,7 @@ struct CellSummary {
   int stages = 1;
   int tallest_pull_down = 0;
   int tallest_pull_up = 0;
+  Circuit circuit = {};  // Without devices for a run of an older gatedyno.
 };
 
 struct FailedJob {
@@ -42,6 +45,8 @@ struct RunFacts {
   std::vector<double> fanouts;  // Empty: chosen arc by arc.
   double accuracy = 0.0;        // Asked for, of each delay.
   Tolerance tolerance;
+  std::vector<ToleranceRule> tolerance_rules = {};
+  std::vector<Exemption> exemptions = {};
   std::string program;  // "gatedyno 0.1.0".
   std::string simulator;
   std::string started;  // ISO 8601, UTC.

@@ -8,6 +8,8 @@
 
 #include <fmt/format.h>
 
+#include "harness/record/agreement_json.h"
+#include "harness/record/circuit_json.h"
 #include "harness/record/comparison_json.h"
 
 namespace gatedyno {
@@ -26,7 +28,9 @@ json FactsToJson(const RunFacts& facts) {
           {"accuracy", facts.accuracy},
           {"tolerances",
            {{"effort", facts.tolerance.effort},
-            {"parasitic", facts.tolerance.parasitic}}},
+            {"parasitic", facts.tolerance.parasitic},
+            {"rules", ToleranceRulesToJson(facts.tolerance_rules)}}},
+          {"exemptions", ExemptionsToJson(facts.exemptions)},
           {"program", facts.program},
           {"simulator", facts.simulator},
           {"started", facts.started}};
@@ -37,7 +41,8 @@ json CellToJson(const CellSummary& cell) {
           {"functions", cell.functions},
           {"stages", cell.stages},
           {"tallest_pull_down", cell.tallest_pull_down},
-          {"tallest_pull_up", cell.tallest_pull_up}};
+          {"tallest_pull_up", cell.tallest_pull_up},
+          {"circuit", CircuitToJson(cell.circuit)}};
 }
 
 json FailedJobToJson(const FailedJob& job) {
@@ -91,6 +96,13 @@ RunFacts ReadFacts(const json& from) {
   from.at("accuracy").get_to(facts.accuracy);
   from.at("tolerances").at("effort").get_to(facts.tolerance.effort);
   from.at("tolerances").at("parasitic").get_to(facts.tolerance.parasitic);
+  // Not there in a result of gatedyno 0.1.
+  if (const json& allowed = from.at("tolerances"); allowed.contains("rules")) {
+    facts.tolerance_rules = ReadToleranceRules(allowed.at("rules"));
+  }
+  if (from.contains("exemptions")) {
+    facts.exemptions = ReadExemptions(from.at("exemptions"));
+  }
   from.at("program").get_to(facts.program);
   from.at("simulator").get_to(facts.simulator);
   from.at("started").get_to(facts.started);
@@ -104,6 +116,9 @@ CellSummary ReadCell(const json& from) {
   from.at("stages").get_to(cell.stages);
   from.at("tallest_pull_down").get_to(cell.tallest_pull_down);
   from.at("tallest_pull_up").get_to(cell.tallest_pull_up);
+  if (from.contains("circuit")) {
+    cell.circuit = ReadCircuit(from.at("circuit"));
+  }
   return cell;
 }
 

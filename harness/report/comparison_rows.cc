@@ -101,7 +101,9 @@ std::string ComparisonHead() {
                                "verdict"});
 }
 
-std::string ComparisonRow(const Comparison& row, const Style& style) {
+std::string ComparisonRow(const Comparison& row,
+                          const Style& style,
+                          const std::string& note) {
   const std::string arc = DescribeArc(row.arc);
   const bool fits = ColumnsOf(arc) <= kArcColumns;
   Cells cells = row.line ? MeasuredCells(row) : UnmeasuredCells(row);
@@ -118,6 +120,7 @@ std::string ComparisonRow(const Comparison& row, const Style& style) {
   if (row.verdict != Verdict::kWithin) {
     const std::string indent(kReasonIndent, ' ');
     text += style.Quiet(Wrap(indent + ReasonOf(row), kReasonIndent)) + '\n';
+    text += note.empty() ? "" : Wrap(indent + note, kReasonIndent) + '\n';
   }
   return text;
 }

@@ -15,9 +15,11 @@ std::string ComparisonHead();
 
 // Arc, g by hand, measured and difference, p by hand (with measured p_inv, and
 // with 1), measured and difference, verdict.  Below it, unless it is within,
-// why, and the side inputs.  An arc whose names are too long for its column
-// has a line of its own above its numbers.
-std::string ComparisonRow(const Comparison& row, const Style& style);
+// why, the side inputs, and `note` where there is one.  An arc whose names are
+// too long for its column has a line of its own above its numbers.
+std::string ComparisonRow(const Comparison& row,
+                          const Style& style,
+                          const std::string& note = "");
 
 }  // namespace gatedyno
 

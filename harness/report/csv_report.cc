@@ -2,37 +2,17 @@
 
 #include <array>
 #include <optional>
-#include <string_view>
 #include <vector>
 
-#include <fmt/format.h>
-#include <fmt/ranges.h>
+#include "harness/compare/excuse.h"
+#include "harness/report/csv_text.h"
+#include "harness/report/exemption_text.h"
 
 namespace gatedyno {
 namespace {
 
-// RFC 4180, section 2: fields with commas, quotes or line breaks are quoted,
-// and quotes inside are doubled.
-std::string Field(std::string_view text) {
-  if (text.find_first_of(",\"\r\n") == std::string_view::npos) {
-    return std::string(text);
-  }
-  std::string quoted = "\"";
-  for (const char c : text) {
-    quoted += c;
-    if (c == '"') {
-      quoted += c;
-    }
-  }
-  return quoted + '"';
-}
-
-std::string Number(double value) {
-  return fmt::format("{}", value);
-}
-
 std::string IfMeasured(const Comparison& row, std::optional<double> value) {
-  return row.line && value ? Number(*value) : "";
+  return row.line && value ? CsvNumber(*value) : "";
 }
 
 struct Column {
@@ -41,17 +21,18 @@ struct Column {
 };
 
 constexpr std::array kColumns = {
-    Column{"corner", [](const Comparison& r) { return Field(r.corner); }},
-    Column{"cell", [](const Comparison& r) { return Field(r.arc.cell); }},
-    Column{"pin", [](const Comparison& r) { return Field(r.arc.pin); }},
-    Column{"output", [](const Comparison& r) { return Field(r.arc.output); }},
+    Column{"corner", [](const Comparison& r) { return CsvField(r.corner); }},
+    Column{"cell", [](const Comparison& r) { return CsvField(r.arc.cell); }},
+    Column{"pin", [](const Comparison& r) { return CsvField(r.arc.pin); }},
+    Column{"output",
+           [](const Comparison& r) { return CsvField(r.arc.output); }},
     Column{
         "edge",
         [](const Comparison& r) { return std::string(EdgeName(r.arc.edge)); }},
     Column{"side",
-           [](const Comparison& r) { return Field(DescribeSide(r.arc)); }},
+           [](const Comparison& r) { return CsvField(DescribeSide(r.arc)); }},
     Column{"g_hand",
-           [](const Comparison& r) { return Number(r.estimate.effort); }},
+           [](const Comparison& r) { return CsvNumber(r.estimate.effort); }},
     Column{"g",
            [](const Comparison& r) { return IfMeasured(r, r.effort.value); }},
     Column{"g_u",
@@ -64,11 +45,11 @@ constexpr std::array kColumns = {
         [](const Comparison& r) { return IfMeasured(r, r.effort_difference); }},
     Column{"p_hand_nodes",
            [](const Comparison& r) {
-             return Number(r.estimate.parasitic_by_nodes);
+             return CsvNumber(r.estimate.parasitic_by_nodes);
            }},
     Column{"p_hand_elmore",
            [](const Comparison& r) {
-             return Number(r.estimate.parasitic_by_elmore);
+             return CsvNumber(r.estimate.parasitic_by_elmore);
            }},
     Column{"p_hand_tau",
            [](const Comparison& r) { return IfMeasured(r, r.hand_parasitic); }},
@@ -83,15 +64,15 @@ constexpr std::array kColumns = {
            }},
     Column{"slope_s",
            [](const Comparison& r) {
-             return r.line ? Number(r.line->slope_s) : "";
+             return r.line ? CsvNumber(r.line->slope_s) : "";
            }},
     Column{"intercept_s",
            [](const Comparison& r) {
-             return r.line ? Number(r.line->intercept_s) : "";
+             return r.line ? CsvNumber(r.line->intercept_s) : "";
            }},
     Column{"largest_residual_s",
            [](const Comparison& r) {
-             return r.line ? Number(r.line->largest_residual_s) : "";
+             return r.line ? CsvNumber(r.line->largest_residual_s) : "";
            }},
     Column{
         "bent",
@@ -100,25 +81,28 @@ constexpr std::array kColumns = {
            [](const Comparison& r) {
              return std::string(VerdictName(r.verdict));
            }},
-    Column{"reason", [](const Comparison& r) { return Field(r.reason); }},
+    Column{"reason", [](const Comparison& r) { return CsvField(r.reason); }},
 };
 
 }  // namespace
 
-std::string CsvReport(const RunResult& result) {
-  constexpr const char* kLineEnd = "\r\n";
+std::string CsvReport(const RunResult& result, const std::string& today) {
   std::vector<std::string> fields;
   fields.reserve(kColumns.size());
   for (const Column& column : kColumns) {
     fields.emplace_back(column.name);
   }
-  std::string text = fmt::format("{}{}", fmt::join(fields, ","), kLineEnd);
+  fields.insert(fields.end(), {"excused", "exemption"});
+  std::string text = CsvLine(fields);
   for (const Comparison& row : result.comparisons) {
     fields.clear();
     for (const Column& column : kColumns) {
       fields.push_back(column.value(row));
     }
-    text += fmt::format("{}{}", fmt::join(fields, ","), kLineEnd);
+    const std::vector<Exemption>& exemptions = result.facts.exemptions;
+    fields.emplace_back(IsExcused(row, exemptions, today) ? "yes" : "no");
+    fields.push_back(CsvField(ExemptionNote(row, exemptions, today)));
+    text += CsvLine(fields);
   }
   return text;
 }

@@ -9,8 +9,10 @@
 
 namespace gatedyno {
 
-// Lines end with CRLF; an empty field stands for "not measured".
-std::string CsvReport(const RunResult& result);
+// Lines end with CRLF; an empty field stands for "not measured".  "excused"
+// says whether exemptions that are in force on the day `today` cover all that
+// is wrong with the arc, "exemption" what they say (report/exemption_text.h).
+std::string CsvReport(const RunResult& result, const std::string& today);
 
 }  // namespace gatedyno
 

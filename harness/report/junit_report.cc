@@ -8,7 +8,9 @@
 
 #include <fmt/format.h>
 
+#include "harness/compare/excuse.h"
 #include "harness/compare/summary.h"
+#include "harness/report/exemption_text.h"
 #include "harness/report/html_text.h"
 
 namespace gatedyno {
@@ -53,22 +55,33 @@ std::string Numbers(const Comparison& row) {
   return text + Property("bent", row.bent ? "yes" : "no");
 }
 
-std::string Outcome(const Comparison& row) {
-  switch (row.verdict) {
-    case Verdict::kWithin:
-      return "";
-    case Verdict::kBeyond:
-      return fmt::format("      <failure type=\"beyond\" message=\"{}\"/>\n",
-                         Attribute(row.reason));
-    case Verdict::kNotMeasured:
-      return fmt::format(
-          "      <error type=\"not measured\" message=\"{}\"/>\n",
-          Attribute(row.reason));
+// What exemptions say, by the row.
+struct Excuses {
+  const std::vector<Exemption>& exemptions;
+  const std::string& today;
+
+  bool Cover(const Comparison& row) const {
+    return IsExcused(row, exemptions, today);
   }
-  return "";
+};
+
+std::string Outcome(const Comparison& row, const Excuses& excuses) {
+  if (row.verdict == Verdict::kWithin) {
+    return "";
+  }
+  if (excuses.Cover(row)) {
+    return fmt::format(
+        "      <skipped message=\"{}\"/>\n",
+        Attribute(ExemptionNote(row, excuses.exemptions, excuses.today)));
+  }
+  const bool beyond = row.verdict == Verdict::kBeyond;
+  return fmt::format("      <{} type=\"{}\" message=\"{}\"/>\n",
+                     beyond ? "failure" : "error",
+                     VerdictName(row.verdict),
+                     Attribute(row.reason));
 }
 
-std::string Case(const Comparison& row) {
+std::string Case(const Comparison& row, const Excuses& excuses) {
   const std::string side = DescribeSide(row.arc);
   return fmt::format(
       "    <testcase classname=\"{}\" name=\"{}{}\">\n      <properties>\n{}"
@@ -77,14 +90,25 @@ std::string Case(const Comparison& row) {
       Attribute(DescribeArc(row.arc)),
       side.empty() ? "" : Attribute(" with " + side),
       Numbers(row),
-      Outcome(row));
+      Outcome(row, excuses));
 }
 
-std::string Counts(const Summary& summary, size_t rows) {
-  return fmt::format("tests=\"{}\" failures=\"{}\" errors=\"{}\"",
-                     rows,
-                     summary.beyond,
-                     summary.not_measured);
+std::string Counts(Rows rows, const Excuses& excuses) {
+  Summary summary;
+  int skipped = 0;
+  for (const Comparison& row : rows) {
+    const bool covered = excuses.Cover(row);
+    skipped += covered ? 1 : 0;
+    summary.beyond += !covered && row.verdict == Verdict::kBeyond ? 1 : 0;
+    summary.not_measured +=
+        !covered && row.verdict == Verdict::kNotMeasured ? 1 : 0;
+  }
+  return fmt::format(
+      "tests=\"{}\" failures=\"{}\" errors=\"{}\" skipped=\"{}\"",
+      rows.size(),
+      summary.beyond,
+      summary.not_measured,
+      skipped);
 }
 
 // The rows of one corner follow each other.
@@ -110,20 +134,21 @@ std::string Timestamp(std::string started) {
 
 }  // namespace
 
-std::string JunitReport(const RunResult& result) {
+std::string JunitReport(const RunResult& result, const std::string& today) {
+  const Excuses excuses{result.facts.exemptions, today};
   const Rows rows(result.comparisons);
   std::string text = fmt::format(
       "<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n<testsuites name=\"{}\" "
       "{}>\n",
       Attribute(result.facts.title),
-      Counts(Summarise(rows), rows.size()));
+      Counts(rows, excuses));
   for (const Rows suite : ByCorner(rows)) {
     text += fmt::format("  <testsuite name=\"{}\" {} timestamp=\"{}\">\n",
                         Attribute(suite.front().corner),
-                        Counts(Summarise(suite), suite.size()),
+                        Counts(suite, excuses),
                         Attribute(Timestamp(result.facts.started)));
     for (const Comparison& row : suite) {
-      text += Case(row);
+      text += Case(row, excuses);
     }
     text += "  </testsuite>\n";
   }

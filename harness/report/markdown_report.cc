@@ -2,9 +2,12 @@
 
 #include <algorithm>
 #include <cstddef>
+#include <vector>
 
 #include <fmt/format.h>
 
+#include "harness/compare/excuse.h"
+#include "harness/report/exemption_text.h"
 #include "harness/report/number_text.h"
 #include "harness/report/run_table.h"
 #include "harness/report/verdict_text.h"
@@ -16,13 +19,13 @@ constexpr const char* kHead =
     "| cell | arc | corner | g hand | g | diff | p hand | p | diff | verdict "
     "|\n|---|---|---|--:|--:|--:|--:|--:|--:|---|\n";
 
-std::string Row(const Comparison& row) {
+std::string Row(const Comparison& row, const std::string& note) {
   const bool measured = row.line.has_value();
   const auto shown = [&](const std::string& text) {
     return measured ? text : std::string("-");
   };
   return fmt::format(
-      "| {} | {} | {} | {:.3f} | {} | {} | {} | {} | {} | {}{} |\n",
+      "| {} | {} | {} | {:.3f} | {} | {} | {} | {} | {} | {}{}{} |\n",
       CodeSpan(row.arc.cell),
       CodeSpan(DescribeArc(row.arc)),
       CodeSpan(row.corner),
@@ -33,15 +36,18 @@ std::string Row(const Comparison& row) {
       shown(WithUncertainty(row.parasitic, 2)),
       shown(SignedPercent(row.parasitic_difference)),
       VerdictName(row.verdict),
-      row.bent ? ", bent" : "");
+      row.bent ? ", bent" : "",
+      note.empty() ? "" : ", " + CodeSpan(note));
 }
 
 template <class Wanted>
-std::string Rows(const RunResult& result, const Wanted& wanted) {
+std::string Rows(const RunResult& result,
+                 const std::string& today,
+                 const Wanted& wanted) {
   std::string rows;
   for (const Comparison& row : result.comparisons) {
     if (wanted(row)) {
-      rows += Row(row);
+      rows += Row(row, ExemptionNote(row, result.facts.exemptions, today));
     }
   }
   return rows;
@@ -57,6 +63,21 @@ std::string Corners(const RunResult& result) {
                          Picoseconds(calibration.fo4_s));
   }
   return result.calibrations.empty() ? "" : table + '\n';
+}
+
+std::string Exemptions(const RunResult& result, const std::string& today) {
+  const std::vector<Exemption>& exemptions = result.facts.exemptions;
+  const std::vector<ExemptionUse> uses = UseOfExemptions(result, today);
+  std::string list;
+  for (size_t i = 0; i < exemptions.size(); ++i) {
+    list += fmt::format("- {}: {}: {} ({})\n",
+                        CodeSpan(ExemptionScope(exemptions[i])),
+                        ExemptionStanding(exemptions[i], uses[i]),
+                        CodeSpan(exemptions[i].reason),
+                        CodeSpan(exemptions[i].author));
+  }
+  return list.empty() ? ""
+                      : fmt::format("Exemptions on {}:\n\n{}\n", today, list);
 }
 
 size_t LongestRunOfBackticks(std::string_view text) {
@@ -89,7 +110,7 @@ std::string CodeSpan(std::string_view text) {
   return fmt::format("{0}{1}{2}{1}{0}", fence, pad, inside);
 }
 
-std::string MarkdownReport(const RunResult& result) {
+std::string MarkdownReport(const RunResult& result, const std::string& today) {
   const RunFacts& facts = result.facts;
   std::string text =
       fmt::format("## {}\n\n**{}**\n\n{}, {} drive, begun {}, {}\n\n{}",
@@ -100,13 +121,15 @@ std::string MarkdownReport(const RunResult& result) {
                   facts.started,
                   facts.program,
                   Corners(result));
-  const std::string open = Rows(result, [](const Comparison& row) {
+  const std::string open = Rows(result, today, [](const Comparison& row) {
     return row.verdict != Verdict::kWithin;
   });
   if (!open.empty()) {
     text += fmt::format("Not within:\n\n{}{}\n", kHead, open);
   }
-  const std::string all = Rows(result, [](const Comparison&) { return true; });
+  text += Exemptions(result, today);
+  const std::string all =
+      Rows(result, today, [](const Comparison&) { return true; });
   text +=
       fmt::format("<details><summary>All {}</summary>\n\n{}{}\n</details>\n\n",
                   Counted(static_cast<int>(result.comparisons.size()), "arc"),

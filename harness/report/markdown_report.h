@@ -1,5 +1,5 @@
 // The run for a review thread: GitHub Flavored Markdown, verdict first, then
-// what is not within, then everything, folded.
+// what is not within, then exemptions, then everything, folded.
 
 #ifndef GATEDYNO_REPORT_MARKDOWN_REPORT_H_
 #define GATEDYNO_REPORT_MARKDOWN_REPORT_H_
@@ -11,7 +11,8 @@
 
 namespace gatedyno {
 
-std::string MarkdownReport(const RunResult& result);
+// Exemptions stand as on the day `today`, "2026-12-02".
+std::string MarkdownReport(const RunResult& result, const std::string& today);
 
 // A text of the user's as a code span (CommonMark 0.31, 6.1) that is safe in a
 // table (GFM 0.29, 4.10): nothing in it is a link, a mention or markup.

@@ -40,6 +40,15 @@ std::string WithUncertainty(const Measured& measured, int decimals) {
              : fmt::format("{:.{}f}", measured.value, decimals);
 }
 
+std::string PicosecondsWithUncertainty(const Measured& seconds) {
+  constexpr double kPicoseconds = 1e12;
+  Measured ps{seconds.value * kPicoseconds, std::nullopt};
+  if (seconds.u) {
+    ps.u = *seconds.u * kPicoseconds;
+  }
+  return WithUncertainty(ps, 3);
+}
+
 std::string FractionText(double value) {
   constexpr int kLargestDenominator = 60;
   constexpr double kExact = 1e-9;

@@ -22,6 +22,9 @@ std::string Percent(double ratio);
 // it is not known.
 std::string WithUncertainty(const Measured& measured, int decimals);
 
+// "2.182 ±0.001": in picoseconds, three decimals.
+std::string PicosecondsWithUncertainty(const Measured& seconds);
+
 // "4/3" where the value is a fraction with a denominator up to 60, to 1e-9;
 // "2" for a whole number; empty otherwise.
 std::string FractionText(double value);

@@ -4,28 +4,23 @@
 
 #include <fmt/format.h>
 
+#include "harness/report/circuit_svg.h"
 #include "harness/report/html_text.h"
 #include "harness/report/page_arcs.h"
 #include "harness/report/page_cells.h"
 #include "harness/report/page_data.h"
+#include "harness/report/page_exemptions.h"
 #include "harness/report/page_head.h"
 #include "harness/report/page_heat.h"
 #include "harness/report/page_method.h"
 #include "harness/report/page_parts.h"
+#include "harness/report/page_policy.h"
+#include "harness/report/page_waves.h"
 #include "harness/report/run_table.h"
 #include "harness/report/verdict_text.h"
 
 namespace gatedyno {
 namespace {
-
-// Styles are let in whole, for the attributes that the charts set.
-std::string Policy() {
-  return fmt::format(
-      "default-src 'none'; base-uri 'none'; form-action 'none'; img-src data:; "
-      "style-src 'unsafe-inline'; script-src {} {}",
-      PolicyHash(kChartScript.sha256),
-      PolicyHash(kPageScript.sha256));
-}
 
 std::string Title(const RunFacts& facts) {
   return facts.title.empty() ? "cells on " + facts.node : facts.title;
@@ -33,10 +28,12 @@ std::string Title(const RunFacts& facts) {
 
 }  // namespace
 
-std::string Page(const RunResult& result, const RunSource& source) {
+std::string Page(const RunResult& result,
+                 const RunSource& source,
+                 std::span<const ArcWaves> waves) {
   const RunFacts& facts = result.facts;
   const std::map<std::string, std::string> values = {
-      {"policy", Policy()},
+      {"policy", PagePolicy(kPageScript)},
       {"style", std::string(kPageStyle.text)},
       {"title", Html(Title(facts))},
       {"node", fmt::format("{}: {}", Html(facts.node), Html(facts.node_title))},
@@ -46,7 +43,12 @@ std::string Page(const RunResult& result, const RunSource& source) {
       {"worst", KeepPercents(WorstList(result))},
       {"corners", CornerTable(result)},
       {"heat", HeatMaps(result)},
-      {"arcs", ArcTable(result)},
+      {"waves", WavesSection(waves, result)},
+      {"waves link", WavesLink(waves)},
+      {"exemptions", ExemptionSection(result, source.today)},
+      {"exemption_link", ExemptionLink(result)},
+      {"arcs", ArcTable(result, source.today)},
+      {"symbols", CircuitSymbols()},
       {"cells", CellSections(result)},
       {"method", KeepPercents(MethodList(result, source))},
       {"plan", PlanText(source)},

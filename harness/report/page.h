@@ -4,8 +4,10 @@
 #ifndef GATEDYNO_REPORT_PAGE_H_
 #define GATEDYNO_REPORT_PAGE_H_
 
+#include <span>
 #include <string>
 
+#include "harness/record/arc_waves.h"
 #include "harness/record/run_result.h"
 #include "harness/report/run_source.h"
 
@@ -13,8 +15,10 @@ namespace gatedyno {
 
 // HTML.  Every text of the user's is escaped, and a content security policy
 // lets no script run but the page's own two, by their hashes.  The same run
-// gives the same bytes.
-std::string Page(const RunResult& result, const RunSource& source);
+// gives the same bytes.  `waves` are those that were asked for, if any.
+std::string Page(const RunResult& result,
+                 const RunSource& source,
+                 std::span<const ArcWaves> waves = {});
 
 }  // namespace gatedyno
 

@@ -5,6 +5,7 @@
 
 #include <fmt/format.h>
 
+#include "harness/report/exemption_text.h"
 #include "harness/report/html_text.h"
 #include "harness/report/number_text.h"
 
@@ -66,27 +67,31 @@ std::string FigureCells(const Comparison& row) {
                      shown(SignedPercent(row.parasitic_difference)));
 }
 
-std::string VerdictCell(const Comparison& row) {
-  constexpr std::array<std::string_view, 3> kClasses = {
-      "within", "beyond", "unmeasured"};
-  return fmt::format(
-      "<b class=\"{}\">{}</b>{}{}",
-      kClasses.at(static_cast<size_t>(row.verdict)),
-      VerdictName(row.verdict),
-      row.bent ? ", bent" : "",
-      row.reason.empty()
-          ? ""
-          : fmt::format(" <small>{}</small>", KeepPercents(Html(row.reason))));
+std::string Small(const std::string& text) {
+  return text.empty()
+             ? ""
+             : fmt::format(" <small>{}</small>", KeepPercents(Html(text)));
 }
 
-std::string Row(const Comparison& row, size_t place) {
+std::string VerdictCell(const Comparison& row, const std::string& note) {
+  constexpr std::array<std::string_view, 3> kClasses = {
+      "within", "beyond", "unmeasured"};
+  return fmt::format("<b class=\"{}\">{}</b>{}{}{}",
+                     kClasses.at(static_cast<size_t>(row.verdict)),
+                     VerdictName(row.verdict),
+                     row.bent ? ", bent" : "",
+                     Small(row.reason),
+                     Small(note));
+}
+
+std::string Row(const Comparison& row, size_t place, const std::string& note) {
   return fmt::format("<tr id=\"{}\"><th scope=\"row\">{}<td>{}<td>{}{}<td>{}\n",
                      ArcId(place),
                      Html(row.arc.cell),
                      ArcCell(row, place),
                      Html(row.corner),
                      FigureCells(row),
-                     VerdictCell(row));
+                     VerdictCell(row, note));
 }
 
 }  // namespace
@@ -95,16 +100,18 @@ std::string ArcId(std::size_t place) {
   return fmt::format("arc-{}", place + 1);
 }
 
-std::string ArcTable(const RunResult& result) {
+std::string ArcTable(const RunResult& result, const std::string& today) {
   std::string table = fmt::format(
-      "<table id=\"arc-table\"><caption>g and p of every arc, by hand and "
+      "<table id=\"arc-table\" class=\"arcs\"><caption>g and p of every arc, "
+      "by hand and "
       "measured; &plusmn; one standard uncertainty</caption>\n{}<tbody>\n",
       Head());
   for (size_t i = 0; i < result.comparisons.size(); ++i) {
     if (i == kRowsAtOnce) {
       table += "</tbody><tbody class=\"more\">\n";
     }
-    table += Row(result.comparisons[i], i);
+    const Comparison& row = result.comparisons[i];
+    table += Row(row, i, ExemptionNote(row, result.facts.exemptions, today));
   }
   return table + "</tbody></table>\n";
 }

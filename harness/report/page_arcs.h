@@ -17,7 +17,8 @@ namespace gatedyno {
 inline constexpr std::size_t kRowsAtOnce = 200;
 
 std::string ArcId(std::size_t place);
-std::string ArcTable(const RunResult& result);
+// Exemptions stand as on the day `today`, "2026-12-02".
+std::string ArcTable(const RunResult& result, const std::string& today);
 
 }  // namespace gatedyno
 

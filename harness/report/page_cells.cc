@@ -10,6 +10,7 @@
 #include "harness/report/html_text.h"
 #include "harness/report/number_text.h"
 #include "harness/report/page_arcs.h"
+#include "harness/report/page_circuit.h"
 #include "harness/report/verdict_text.h"
 
 namespace gatedyno {
@@ -73,6 +74,18 @@ std::string Counts(const std::vector<size_t>& places, const RunResult& result) {
                      counts[Verdict::kNotMeasured]);
 }
 
+std::string HandTable(const CellSummary& cell, const std::string& rows) {
+  return fmt::format(
+      "<div class=\"wide\" role=\"region\" tabindex=\"0\" aria-label=\"hand "
+      "numbers of {0}\"><table class=\"hand\"><caption class=\"unseen\">Hand "
+      "numbers of {0}</caption><thead><tr><th scope=\"col\">arc</th><th "
+      "scope=\"col\">other inputs</th><th scope=\"col\">g</th><th "
+      "scope=\"col\">p by nodes</th><th scope=\"col\">p by Elmore</th></tr>"
+      "</thead>\n<tbody>\n{1}</tbody></table></div>",
+      Html(cell.name),
+      rows);
+}
+
 std::string Section(const CellSummary& cell,
                     const std::vector<size_t>& places,
                     const RunResult& result) {
@@ -81,21 +94,17 @@ std::string Section(const CellSummary& cell,
     functions += fmt::format("<p><code>{}</code></p>\n", Html(function));
   }
   return fmt::format(
-      "<section class=\"cell\"><h3>{0}</h3>\n{1}<p>{2}; tallest stacks: {3} "
-      "pull-down, {4} pull-up. Arcs at all corners: {5}.</p>\n<div "
-      "class=\"wide\" role=\"region\" tabindex=\"0\" aria-label=\"hand numbers "
-      "of {0}\"><table class=\"hand\"><caption class=\"unseen\">Hand numbers "
-      "of {0}</caption><thead><tr><th scope=\"col\">arc</th><th scope=\"col\">"
-      "other inputs</th><th scope=\"col\">g</th><th scope=\"col\">p by "
-      "nodes</th><th scope=\"col\">p by Elmore</th></tr></thead>\n<tbody>\n{6}"
-      "</tbody></table></div></section>\n",
+      "<section class=\"cell\"><h3>{}</h3>\n{}<p>{}; tallest stacks: {} "
+      "pull-down, {} pull-up. Arcs at all corners: {}.</p>\n<div "
+      "class=\"abreast\">{}{}</div></section>\n",
       Html(cell.name),
       functions,
       Counted(cell.stages, "stage"),
       cell.tallest_pull_down,
       cell.tallest_pull_up,
       Counts(places, result),
-      ArcRows(places, result));
+      CircuitFigure(cell),
+      HandTable(cell, ArcRows(places, result)));
 }
 
 }  // namespace

@@ -1,5 +1,5 @@
-// The page's section on each cell: function, stages, and the hand numbers of
-// each arc with its side vector.
+// The page's section on each cell: function, stages, transistors, and the hand
+// numbers of each arc with its side vector.
 
 #ifndef GATEDYNO_REPORT_PAGE_CELLS_H_
 #define GATEDYNO_REPORT_PAGE_CELLS_H_

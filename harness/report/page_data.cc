@@ -1,16 +1,12 @@
 #include "harness/report/page_data.h"
 
-#include <cmath>
-#include <cstddef>
-#include <cstdlib>
-#include <map>
-#include <optional>
 #include <utility>
 
-#include <fmt/format.h>
 #include <nlohmann/json.hpp>
 
-#include "harness/report/figure_view.h"
+#include "harness/compare/figure.h"
+#include "harness/report/data_json.h"
+#include "harness/report/hand_line.h"
 
 namespace gatedyno {
 namespace {
@@ -19,57 +15,33 @@ using nlohmann::json;
 
 constexpr double kPicosecondsPerSecond = 1e12;
 
-// Nine digits: far more than is measured, at half the size of all of them.
-json Short(double number) {
-  if (!std::isfinite(number)) {
-    return nullptr;
-  }
-  return std::strtod(fmt::format("{:.9g}", number).c_str(), nullptr);
-}
-
-json Short(const std::optional<double>& number) {
-  return number ? Short(*number) : json(nullptr);
-}
-
 json Picoseconds(double seconds) {
-  return Short(seconds * kPicosecondsPerSecond);
+  return ShortNumber(seconds * kPicosecondsPerSecond);
 }
 
-// Gives each name the place at which it came first.
-class Places {
- public:
-  size_t Of(const std::string& name) {
-    const auto [place, fresh] = places_.try_emplace(name, names_.size());
-    if (fresh) {
-      names_.push_back(name);
-    }
-    return place->second;
+// Null for what an arc without a line does not have.
+json FigureData(const Comparison& row, Quantity quantity) {
+  const Figure figure = FigureOf(row, quantity);
+  if (!row.line) {
+    return {ShortNumber(figure.hand),
+            nullptr,
+            nullptr,
+            nullptr,
+            nullptr,
+            ShortNumber(figure.tolerance)};
   }
-  const json& names() const { return names_; }
-
- private:
-  std::map<std::string, size_t> places_;
-  json names_ = json::array();
-};
-
-json FigureData(const FigureView& figure) {
-  return {Short(figure.hand),
-          Short(figure.measured.value),
-          Short(figure.measured.u),
-          Short(figure.difference),
-          Short(figure.difference_expanded),
-          Short(figure.tolerance)};
-}
-
-// Of an arc without a line.
-json HandData(double hand, double tolerance) {
-  return {Short(hand), nullptr, nullptr, nullptr, nullptr, Short(tolerance)};
+  return {ShortNumber(figure.hand),
+          ShortNumber(figure.measured.value),
+          ShortNumber(figure.measured.u),
+          ShortNumber(figure.difference),
+          ShortNumber(figure.expanded),
+          ShortNumber(figure.tolerance)};
 }
 
 json PointsData(const Comparison& row) {
   json points = json::array();
   for (const Point& point : row.points) {
-    points.push_back({Short(point.fanout), Picoseconds(point.delay_s)});
+    points.push_back({ShortNumber(point.fanout), Picoseconds(point.delay_s)});
   }
   return points;
 }
@@ -80,17 +52,14 @@ json ArcData(const Comparison& row, const Calibration* calibration) {
               {"s", DescribeSide(row.arc)},
               {"v", VerdictName(row.verdict)},
               {"b", row.bent},
+              {"g", FigureData(row, Quantity::kEffort)},
+              {"p", FigureData(row, Quantity::kParasitic)},
               {"x", PointsData(row)},
               {"l", nullptr},
               {"h", nullptr}};
   if (row.line) {
-    arc["g"] = FigureData(EffortView(row));
-    arc["p"] = FigureData(ParasiticView(row, calibration));
     arc["l"] = {Picoseconds(row.line->slope_s),
                 Picoseconds(row.line->intercept_s)};
-  } else {
-    arc["g"] = HandData(row.estimate.effort, row.tolerance.effort);
-    arc["p"] = HandData(row.hand_parasitic, row.tolerance.parasitic);
   }
   if (calibration != nullptr) {
     const HandLine hand = HandLineOf(row, *calibration);
@@ -102,8 +71,8 @@ json ArcData(const Comparison& row, const Calibration* calibration) {
 }  // namespace
 
 std::string PageData(const RunResult& result) {
-  Places cells;
-  Places corners;
+  NamePlaces cells;
+  NamePlaces corners;
   json arcs = json::array();
   for (const Comparison& row : result.comparisons) {
     json arc = ArcData(row, CalibrationOf(row, result));
@@ -116,7 +85,7 @@ std::string PageData(const RunResult& result) {
       {"format", "gatedyno-page/1"},
       {"cells", cells.names()},
       {"corners", corners.names()},
-      {"u", checked ? Short(result.accuracy.rms) : json(nullptr)},
+      {"u", checked ? ShortNumber(result.accuracy.rms) : json(nullptr)},
       {"arcs", std::move(arcs)}};
   return data.dump(-1, ' ', false, json::error_handler_t::replace);
 }

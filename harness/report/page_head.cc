@@ -25,16 +25,6 @@ std::string CountRow(const char* what,
       not_measured);
 }
 
-// "2.182 ±0.001", in picoseconds.
-std::string PicosecondsWithUncertainty(const Measured& seconds) {
-  constexpr double kPicoseconds = 1e12;
-  Measured ps{seconds.value * kPicoseconds, std::nullopt};
-  if (seconds.u) {
-    ps.u = *seconds.u * kPicoseconds;
-  }
-  return WithUncertainty(ps, 3);
-}
-
 std::string CornerRow(const Calibration& calibration) {
   const Corner& corner = calibration.corner;
   return fmt::format(

@@ -9,6 +9,7 @@
 
 #include "harness/report/html_text.h"
 #include "harness/report/number_text.h"
+#include "harness/report/verdict_text.h"
 
 namespace gatedyno {
 namespace {
@@ -41,6 +42,28 @@ std::string Fanouts(const RunFacts& facts) {
              : fmt::format("{:g}", fmt::join(facts.fanouts, ", "));
 }
 
+// "g 30 %, p 40 %": what the rule changes.
+std::string Allowed(const ToleranceRule& rule) {
+  std::vector<std::string> parts;
+  if (rule.effort) {
+    parts.push_back("g " + Percent(*rule.effort));
+  }
+  if (rule.parasitic) {
+    parts.push_back("p " + Percent(*rule.parasitic));
+  }
+  return fmt::format("{}", fmt::join(parts, ", "));
+}
+
+std::string RuleItems(const RunFacts& facts) {
+  std::string items;
+  for (const ToleranceRule& rule : facts.tolerance_rules) {
+    items += Item(
+        "allowed by rule",
+        fmt::format("{} for {}", Allowed(rule), DescribePattern(rule.where)));
+  }
+  return items;
+}
+
 std::string Jobs(const JobCounts& jobs) {
   return fmt::format("{}: {} simulated, {} taken from stores, {} failed",
                      jobs.wanted,
@@ -64,11 +87,8 @@ std::string MethodList(const RunResult& result, const RunSource& source) {
   return "<dl>\n" +
          Item("node", fmt::format("{}: {}", facts.node, facts.node_title)) +
          Item("drive", std::string(DriveName(facts.drive))) +
-         Item("fanouts", Fanouts(facts)) +
-         Item("allowed",
-              fmt::format("g {}, p {} of the hand number",
-                          Percent(facts.tolerance.effort),
-                          Percent(facts.tolerance.parasitic))) +
+         Item("fanouts", Fanouts(facts)) + Item("allowed", AllowedText(facts)) +
+         RuleItems(facts) +
          Item("accuracy promised",
               fmt::format("{} of each delay", SmallPercent(facts.accuracy))) +
          Item("accuracy checked", Checked(result.accuracy)) +

@@ -17,6 +17,8 @@ struct PagePart {
 extern const PagePart kPageShell;
 extern const PagePart kPageStyle;      // page.css
 extern const PagePart kPageScript;     // script/*.js, as one
+extern const PagePart kVersusShell;    // versus.html
+extern const PagePart kVersusScript;   // script/*.js of its own, as one
 extern const PagePart kChartScript;    // vendor/charts.min.js
 extern const PagePart kChartLicences;  // vendor/LICENSES.txt
 

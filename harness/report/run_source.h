@@ -12,7 +12,8 @@ namespace gatedyno {
 struct RunSource {
   std::string store;  // File name without its folder.
   RunId run = 0;
-  std::string plan;  // As run, JSON.
+  std::string plan;        // As run, JSON.
+  std::string today = {};  // "2026-12-02": what exemptions expire by.
 };
 
 }  // namespace gatedyno

@@ -8,9 +8,12 @@
 #include <fmt/format.h>
 #include <fmt/ranges.h>
 
+#include "harness/compare/excuse.h"
 #include "harness/compare/summary.h"
 #include "harness/report/comparison_rows.h"
+#include "harness/report/exemption_text.h"
 #include "harness/report/number_text.h"
+#include "harness/report/verdict_text.h"
 #include "harness/report/wrap.h"
 
 namespace gatedyno {
@@ -82,12 +85,10 @@ std::string FactLines(const RunResult& result, const Style& style) {
   const RunFacts& facts = result.facts;
   return style.Heading(Wrap(facts.title)) + '\n' +
          Wrap(fmt::format("node {}: {}", facts.node, facts.node_title)) + '\n' +
-         Wrap(
-             fmt::format("{} drive, {}; allowed: g {}, p {} of the hand number",
-                         DriveName(facts.drive),
-                         FanoutText(facts),
-                         Percent(facts.tolerance.effort),
-                         Percent(facts.tolerance.parasitic))) +
+         Wrap(fmt::format("{} drive, {}; allowed: {}",
+                          DriveName(facts.drive),
+                          FanoutText(facts),
+                          AllowedText(facts))) +
          '\n' + Wrap(AccuracyLine(result)) + '\n';
 }
 
@@ -123,10 +124,32 @@ std::string SummaryLines(const RunResult& result) {
   return text;
 }
 
+std::string ExemptionLines(const RunResult& result, const std::string& today) {
+  constexpr size_t kIndent = 4;
+  const std::vector<Exemption>& exemptions = result.facts.exemptions;
+  const std::vector<ExemptionUse> uses = UseOfExemptions(result, today);
+  std::string text =
+      exemptions.empty() ? "" : fmt::format("exemptions on {}:\n", today);
+  for (size_t i = 0; i < exemptions.size(); ++i) {
+    const Exemption& exemption = exemptions[i];
+    text += Wrap(fmt::format("  {}: {}",
+                             ExemptionScope(exemption),
+                             ExemptionStanding(exemption, uses[i])),
+                 kIndent) +
+            '\n' +
+            Wrap(fmt::format("    {} ({})", exemption.reason, exemption.author),
+                 kIndent) +
+            '\n';
+  }
+  return text;
+}
+
 class TableWriter {
  public:
-  TableWriter(const RunResult& result, const Style& style)
-      : result_(result), style_(style) {}
+  TableWriter(const RunResult& result,
+              const Style& style,
+              const std::string& today)
+      : result_(result), style_(style), today_(today) {}
 
   std::string Text() {
     text_ = FactLines(result_, style_);
@@ -163,7 +186,8 @@ class TableWriter {
         cell = row.arc.cell;
         AddCell(cell);
       }
-      text_ += ComparisonRow(row, style_);
+      text_ += ComparisonRow(
+          row, style_, ExemptionNote(row, result_.facts.exemptions, today_));
     }
   }
 
@@ -180,7 +204,7 @@ class TableWriter {
     for (const std::string& warning : result_.warnings) {
       text_ += Wrap("warning: " + warning) + '\n';
     }
-    text_ += SummaryLines(result_);
+    text_ += ExemptionLines(result_, today_) + SummaryLines(result_);
     text_ += style_.Quiet(fmt::format(
         "g: slope of delay against fanout, over the reference inverter's of "
         "the same edge. p: intercept\nover tau; by hand, node count times the "
@@ -190,13 +214,16 @@ class TableWriter {
 
   const RunResult& result_;
   const Style& style_;
+  const std::string& today_;
   std::string text_;
 };
 
 }  // namespace
 
-std::string RunTable(const RunResult& result, const Style& style) {
-  return TableWriter(result, style).Text();
+std::string RunTable(const RunResult& result,
+                     const Style& style,
+                     const std::string& today) {
+  return TableWriter(result, style, today).Text();
 }
 
 }  // namespace gatedyno

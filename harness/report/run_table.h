@@ -10,7 +10,10 @@
 
 namespace gatedyno {
 
-std::string RunTable(const RunResult& result, const Style& style);
+// Exemptions stand as on the day `today`, "2026-12-02".
+std::string RunTable(const RunResult& result,
+                     const Style& style,
+                     const std::string& today);
 
 // What every report says of its numbers.
 inline constexpr const char* kCaution =

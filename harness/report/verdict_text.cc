@@ -21,13 +21,17 @@ int Weight(Verdict verdict) {
   return 0;
 }
 
-std::string Allowed(const Tolerance& tolerance) {
-  return fmt::format("g {}, p {} of the hand number",
-                     Percent(tolerance.effort),
-                     Percent(tolerance.parasitic));
-}
-
 }  // namespace
+
+std::string AllowedText(const RunFacts& facts) {
+  const auto rules = static_cast<int>(facts.tolerance_rules.size());
+  return fmt::format("g {}, p {} of the hand number{}",
+                     Percent(facts.tolerance.effort),
+                     Percent(facts.tolerance.parasitic),
+                     rules == 0 ? ""
+                                : fmt::format(", but for {} of the plan",
+                                              Counted(rules, "rule")));
+}
 
 std::string Counted(int count, const std::string& what) {
   return fmt::format("{} {}{}", count, what, count == 1 ? "" : "s");
@@ -68,9 +72,8 @@ std::string VerdictSentence(const RunResult& result) {
                                       : fmt::format("All {} arcs of {} lie",
                                                     arcs,
                                                     Counted(all_cells, "cell"));
-    return fmt::format("{} within what is allowed ({}).",
-                       all,
-                       Allowed(result.facts.tolerance));
+    return fmt::format(
+        "{} within what is allowed ({}).", all, AllowedText(result.facts));
   }
   const std::string unmeasured =
       summary.not_measured == 0
@@ -80,7 +83,7 @@ std::string VerdictSentence(const RunResult& result) {
                         summary.not_measured == 1 ? "was" : "were");
   if (summary.beyond == 0) {
     return fmt::format("Every arc measured lies within what is allowed ({}){}.",
-                       Allowed(result.facts.tolerance),
+                       AllowedText(result.facts),
                        unmeasured);
   }
   return fmt::format("{} of {}, in {} of {}, {} beyond what is allowed ({}){}.",
@@ -89,7 +92,7 @@ std::string VerdictSentence(const RunResult& result) {
                      cells.beyond,
                      Counted(all_cells, "cell"),
                      summary.beyond == 1 ? "lies" : "lie",
-                     Allowed(result.facts.tolerance),
+                     AllowedText(result.facts),
                      unmeasured);
 }
 

@@ -25,6 +25,10 @@ CellCounts CountCells(const RunResult& result);
 // the hand number); 1 arc was not measured."
 std::string VerdictSentence(const RunResult& result);
 
+// "g 25 %, p 35 % of the hand number", and that rules say something else for
+// some arcs.
+std::string AllowedText(const RunFacts& facts);
+
 // "1 arc", "3 arcs".
 std::string Counted(int count, const std::string& what);
 

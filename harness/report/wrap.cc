@@ -31,7 +31,11 @@ size_t BytesOf(std::string_view text, size_t columns) {
 // fits, or, where the first does not, wherever the line ends.
 size_t BreakOf(std::string_view text, size_t columns) {
   const size_t limit = BytesOf(text, columns);
-  const size_t blank = text.find_last_of(' ', limit);
+  size_t blank = text.find_last_of(' ', limit);
+  if (blank != std::string_view::npos && blank > 0 &&
+      text.substr(blank + 1).starts_with('%')) {
+    blank = text.find_last_of(' ', blank - 1);  // Stays with its number.
+  }
   const bool has_word =
       blank != std::string_view::npos && text.find_first_not_of(' ') < blank;
   return has_word ? blank : limit;

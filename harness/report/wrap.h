@@ -16,10 +16,10 @@ inline constexpr std::size_t kColumns = 100;
 std::size_t ColumnsOf(std::string_view text);
 
 // One paragraph, broken at blanks into lines of at most kColumns; all but the
-// first are indented.  A word that does not fit a line is broken where the line
-// ends.  Control characters, which names and messages of others may hold,
-// become '?'; so emphasis comes after wrapping.  Without a final newline.
-// REQUIRES: indent < kColumns.
+// first are indented.  A % stays with its number.  A word that does not fit a
+// line is broken where the line ends.  Control characters, which names and
+// messages of others may hold, become '?'; so emphasis comes after wrapping.
+// Without a final newline. REQUIRES: indent < kColumns.
 std::string Wrap(std::string_view paragraph, std::size_t indent = 2);
 
 // Cut where it is wider than `columns`; control characters become '?'.

@@ -74,8 +74,20 @@ Result<Job> ParseJob(std::string_view text) {
 }
 
 std::string ReplyText(const Reply& reply) {
-  return Dump(
+  std::string text = Dump(
       {{"outcome", OutcomeToJson(reply.outcome)}, {"leaving", reply.leaving}});
+  if (text.size() <= kMaxFrameBytes || !reply.outcome.waves) {
+    return text;
+  }
+  Reply refused;
+  refused.outcome.ending = Ending::kFailed;
+  refused.outcome.message =
+      fmt::format("the waveforms are {} bytes long; the limit is {}",
+                  text.size(),
+                  kMaxFrameBytes);
+  refused.outcome.simulator_s = reply.outcome.simulator_s;
+  refused.leaving = reply.leaving;
+  return ReplyText(refused);
 }
 
 Result<Reply> ParseReply(std::string_view text) {

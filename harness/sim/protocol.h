@@ -19,7 +19,7 @@
 namespace gatedyno {
 
 // Raised whenever either side would misread the other.
-inline constexpr int kProtocolVersion = 1;
+inline constexpr int kProtocolVersion = 2;
 
 struct Hello {
   int protocol = kProtocolVersion;
@@ -44,6 +44,8 @@ Result<Hello> ParseHello(std::string_view text);
 Result<std::string> JobText(const Job& job);
 Result<Job> ParseJob(std::string_view text);
 
+// A reply whose waves are too long for a frame says so in their place: its
+// outcome is failed.
 std::string ReplyText(const Reply& reply);
 Result<Reply> ParseReply(std::string_view text);
 

@@ -11,6 +11,9 @@ namespace {
 using nlohmann::json;
 
 constexpr const char* kColumns[] = {"key", "label", "deck"};
+// Of who asks, for that once: never kept.
+constexpr const char* kWantsWaves = "wants_waves";
+constexpr const char* kWaves = "waves";
 
 std::string ToText(const json& value) {
   return value.dump(-1, ' ', false, json::error_handler_t::replace);
@@ -27,6 +30,7 @@ std::string MeasuresToText(const Job& job) {
   for (const char* column : kColumns) {
     value.erase(column);
   }
+  value.erase(kWantsWaves);
   return ToText(value);
 }
 
@@ -42,7 +46,9 @@ Result<Job> JobFromText(const Job& named, const std::string& measures) {
 }
 
 std::string OutcomeToText(const Outcome& outcome) {
-  return ToText(OutcomeToJson(outcome));
+  json value = OutcomeToJson(outcome);
+  value.erase(kWaves);
+  return ToText(value);
 }
 
 Result<Outcome> OutcomeFromText(const std::string& text) {

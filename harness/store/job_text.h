@@ -12,12 +12,14 @@
 
 namespace gatedyno {
 
-// The job but for its key, label and deck, which have columns of their own.
+// The job but for its key, label and deck, which have columns of their own, and
+// for its wish for waves.
 std::string MeasuresToText(const Job& job);
 // `named` has the key, label and deck; the rest comes from the text.
 Result<Job> JobFromText(const Job& named, const std::string& measures);
 
-// Bytes of the message that are not UTF-8 are replaced.
+// Bytes of the message that are not UTF-8 are replaced.  Waves are left out: a
+// store of a million jobs keeps numbers, and simulates again for a picture.
 std::string OutcomeToText(const Outcome& outcome);
 Result<Outcome> OutcomeFromText(const std::string& text);
 

@@ -25,8 +25,8 @@ const Waveform& WaveformOf(const std::vector<Waveform>& waveforms,
   return *found;
 }
 
-Result<double> MeasureInterval(const Interval& interval,
-                               const std::vector<Waveform>& waveforms) {
+Result<TimedInterval> TimeInterval(const Interval& interval,
+                                   const std::vector<Waveform>& waveforms) {
   double time_s[2] = {};
   const Crossing* ends[] = {&interval.from, &interval.to};
   for (size_t i = 0; i < std::size(ends); ++i) {
@@ -38,7 +38,7 @@ Result<double> MeasureInterval(const Interval& interval,
     }
     time_s[i] = *crossing_s;
   }
-  return time_s[1] - time_s[0];
+  return TimedInterval{interval.name, time_s[0], time_s[1]};
 }
 
 }  // namespace
@@ -62,12 +62,17 @@ Outcome Measure(const Job& job, const std::vector<Waveform>& waveforms) {
     }
   }
   Outcome outcome;
+  std::vector<TimedInterval> timed;
   for (const Interval& interval : job.intervals) {
-    const Result<double> value_s = MeasureInterval(interval, waveforms);
-    if (!value_s.ok()) {
-      return Failed(value_s.error().message);
+    Result<TimedInterval> ends = TimeInterval(interval, waveforms);
+    if (!ends.ok()) {
+      return Failed(ends.error().message);
     }
-    outcome.values_s[interval.name] = *value_s;
+    outcome.values_s[interval.name] = ends->to_s - ends->from_s;
+    timed.push_back(*std::move(ends));
+  }
+  if (job.wants_waves) {
+    outcome.waves = {waveforms, std::move(timed)};
   }
   outcome.ending = Ending::kMeasured;
   return outcome;

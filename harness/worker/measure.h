@@ -18,7 +18,8 @@ namespace gatedyno {
 std::set<std::string> NetsOf(const Job& job);
 
 // Swings first: a delay on a net that floats means nothing.  The outcome is
-// measured or failed; simulator_s is left at 0.
+// measured or failed; simulator_s is left at 0.  Where the job wants waves, the
+// times of its intervals are those that its values are the differences of.
 // REQUIRES: a waveform for each of NetsOf(job).
 Outcome Measure(const Job& job, const std::vector<Waveform>& waveforms);
 

@@ -10,20 +10,11 @@
 #ifndef GATEDYNO_WORKER_WAVEFORM_H_
 #define GATEDYNO_WORKER_WAVEFORM_H_
 
-#include <string>
-#include <vector>
-
 #include "harness/base/result.h"
 #include "harness/record/job.h"
+#include "harness/record/waveform.h"
 
 namespace gatedyno {
-
-// One net's voltage over time.
-struct Waveform {
-  std::string net;
-  std::vector<double> time_s;     // Increasing; at least one.
-  std::vector<double> voltage_v;  // As many.
-};
 
 // Between the neighbours with v0 < level <= v1 (a rise) or v0 > level >= v1 (a
 // fall) for the `occurrence`-th time.  Fails, with the levels reached, when

@@ -2,6 +2,7 @@
 // colours or the width change.
 'use strict';
 
+const hasWhiskers = () => data.arcs.length <= MOST_WHISKERS;
 const charts = new Map();  // Element to {options, chart, half}.
 let printing = false;
 
@@ -12,13 +13,15 @@ function colours() {
   return {
     paper: named('paper'), ink: named('ink'), quiet: named('quiet'),
     rule: named('rule'), within: named('within'), beyond: named('beyond'),
-    'not measured': named('unmeasured'),
+    'not measured': named('unmeasured'), rise: named('rise'),
+    fall: named('fall'),
   };
 }
 
 const PRINT_COLOURS = {
   paper: '#ffffff', ink: '#1c2330', quiet: '#525b6b', rule: '#cfd0cd',
   within: '#245a93', beyond: '#9a1a62', 'not measured': '#5a6170',
+  rise: '#44399a', fall: '#7a4a12',
 };
 
 // The size of a print does not follow the window's.

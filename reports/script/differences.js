@@ -8,8 +8,6 @@ const MARKS = {
   'not measured': {symbol: 'triangle', symbolSize: 9},
 };
 
-const hasWhiskers = () => data.arcs.length <= MOST_WHISKERS;
-
 // The arcs of one figure: those with a line, and those without.
 function differencesOf(figure) {
   const all = data.arcs.map((arc, i) => ({arc, i, f: arc[figure]}));

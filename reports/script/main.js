@@ -1,30 +1,16 @@
-// Starts the parts, and draws anew for print, other colours and other widths.
+// Starts the parts of a run's page.
 'use strict';
 
 let planWasOpen = false;
 
-// A print has every chart, and the plan unfolded.
-function print(begins) {
-  printing = begins;
-  planWasOpen = begins ? element('plan').open : planWasOpen;
-  element('plan').open = begins || planWasOpen;
-  for (const place of charts.keys()) {
-    draw(place);
-  }
+function unfoldPlan(printBegins) {
+  planWasOpen = printBegins ? element('plan').open : planWasOpen;
+  element('plan').open = printBegins || planWasOpen;
 }
 
 prepareTable();
 showDifferences();
 preparePictures();
+showWaves();
 showArcOfHash();
-matchMedia('(prefers-color-scheme: dark)')
-    .addEventListener('change', redrawAll);
-addEventListener('beforeprint', () => print(true));
-addEventListener('afterprint', () => print(false));
-let width = innerWidth;
-addEventListener('resize', () => {
-  if (innerWidth !== width && !printing) {
-    width = innerWidth;
-    redrawAll();
-  }
-});
+redrawWhenNeeded(unfoldPlan);

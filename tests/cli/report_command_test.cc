@@ -127,6 +127,12 @@ TEST_F(ReportCommandTest, SaysWhatIsWrong) {
       {{"--run", "7"},
        "--run 7: " + Path() + " has no such run; see gatedyno status " +
            Path()},
+      {{"--waves", "5"},
+       "--waves: waveforms are part of the page; name its file with --page"},
+      {{"--waves", "0", "-o", Path("a.html")},
+       "--waves 0: expected 1 or more arcs"},
+      {{"--waves", "-3", "-o", Path("a.html")},
+       "--waves -3: expected 1 or more arcs"},
   };
   for (const Case& test : cases) {
     const Result<ExitCode> done = Report(test.words);

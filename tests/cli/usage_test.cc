@@ -32,6 +32,7 @@ TEST(UsageTest, HelpNamesCommandsAndExitCodes) {
                            "status ",
                            "replay ",
                            "report ",
+                           "versus ",
                            "Exit codes: 0 all within, 1 some beyond, 2 bad "
                            "input, 3 jobs that could not be measured,"}) {
     EXPECT_THAT(help.out, HasSubstr(text));
@@ -43,7 +44,7 @@ TEST(UsageTest, HelpNamesCommandsAndExitCodes) {
 
 TEST(UsageTest, EveryCommandHasHelp) {
   for (const char* command :
-       {"estimate", "run", "deck", "status", "replay", "report"}) {
+       {"estimate", "run", "deck", "status", "replay", "report", "versus"}) {
     const Ended help = Program().Run({command, "--help"});
     EXPECT_EQ(help.exit_code, 0) << command;
     EXPECT_THAT(help.out, HasSubstr("Usage: gatedyno " + std::string(command)));
@@ -68,7 +69,7 @@ TEST(UsageTest, RefusesWhatItDoesNotKnow) {
       {{"run", "inv", "--fast"},
        "the following argument was not expected: --fast; see gatedyno --help"},
       {{"run", "inv", "--store"},
-       "--store: 1 required TEXT missing; see gatedyno --help"},
+       "--store: 1 required FILE missing; see gatedyno --help"},
       {{"run", "inv", "--drive", "step"},
        "--drive: step not in {matched,self}; see gatedyno --help"},
       {{"run", "inv", "--workers", "0"},

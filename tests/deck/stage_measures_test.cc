@@ -1,9 +1,12 @@
 #include "harness/deck/stage_measures.h"
 
+#include <gmock/gmock.h>
 #include <gtest/gtest.h>
 
 namespace gatedyno {
 namespace {
+
+using ::testing::ElementsAre;
 
 Outcome SixValues() {
   Outcome outcome;
@@ -42,6 +45,17 @@ TEST(StageMeasuresTest, PointTakesTheValuesOfItsEdges) {
     EXPECT_EQ(point.input_transition_s, tried.input_s);
     EXPECT_EQ(point.output_transition_s, tried.output_s);
   }
+}
+
+TEST(StageMeasuresTest, AnArcHasThreeIntervals) {
+  Arc arc;
+  arc.input_edge = Edge::kRise;
+  arc.edge = Edge::kFall;
+  EXPECT_THAT(IntervalNames(arc),
+              ElementsAre("delay_fall", "input_rise", "output_fall"));
+  arc.edge = Edge::kRise;
+  EXPECT_THAT(IntervalNames(arc),
+              ElementsAre("delay_rise", "input_rise", "output_rise"));
 }
 
 TEST(StageMeasuresTest, LevelsFollowTheSupply) {

@@ -232,5 +232,50 @@ TEST(CharacterizeTest, AReferenceThatDoesNotSlowDownIsNoYardstick) {
             "the fanout");
 }
 
+// nand2 b->y fall is 50 % beyond g and 4.0 tau against 2.4 in p.
+TEST(CharacterizeTest, RulesDecideWhatAnArcIsAllowed) {
+  PreparedRun run = Prepared();
+  run.plan.tolerance_rules = {
+      {.where = {.cells = "nand2", .pins = "b", .edge = Edge::kFall},
+       .effort = 0.6,
+       .parasitic = 0.7},
+      {.where = {.cells = "inv", .edge = {}},
+       .effort = 0.05,
+       .parasitic = std::nullopt}};
+  run.plan.exemptions = {{.where = {},
+                          .quantity = std::nullopt,
+                          .reason = "known",
+                          .author = "M. Ober",
+                          .expires = "2027-03-31"}};
+  const RunResult result = Measure(run, Answer);
+  EXPECT_EQ(result.facts.tolerance_rules, run.plan.tolerance_rules);
+  EXPECT_EQ(result.facts.exemptions, run.plan.exemptions);
+  for (const Comparison& row : result.comparisons) {
+    const bool rises = row.arc.edge == Edge::kRise;
+    const bool widened = row.arc.pin == "b" && !rises;
+    const bool narrowed = row.arc.cell == "inv";
+    EXPECT_EQ(row.tolerance.effort, widened ? 0.6 : narrowed ? 0.05 : 0.25);
+    EXPECT_EQ(row.tolerance.parasitic, widened ? 0.7 : 0.35);
+    // g of the inverter's falling edge is 1.1.
+    EXPECT_EQ(row.verdict,
+              narrowed && !rises ? Verdict::kBeyond : Verdict::kWithin)
+        << row.arc.cell << ": " << row.reason;
+  }
+}
+
+// An arc that could not be calibrated keeps what it was allowed.
+TEST(CharacterizeTest, RulesHoldWithoutACalibration) {
+  PreparedRun run = Prepared();
+  run.plan.tolerance_rules = {{.where = {.cells = "nand2", .edge = {}},
+                               .effort = 0.6,
+                               .parasitic = std::nullopt}};
+  const RunResult result =
+      Measure(run, [](const Job& /*job*/) { return TimedOut(); });
+  ASSERT_EQ(result.comparisons.size(), 6U);
+  for (const Comparison& row : result.comparisons) {
+    EXPECT_EQ(row.tolerance.effort, row.arc.cell == "nand2" ? 0.6 : 0.25);
+  }
+}
+
 }  // namespace
 }  // namespace gatedyno

@@ -52,7 +52,21 @@ json FullPlan() {
           {"accuracy", 0.0005},
           {"drive", "self"},
           {"side_vectors", "all"},
-          {"tolerances", {{"effort", 0.1}, {"parasitic", 0.2}}}};
+          {"tolerances",
+           {{"effort", 0.1},
+            {"parasitic", 0.2},
+            {"rules",
+             json::array({{{"cells", "nor*"},
+                           {"edge", "rise"},
+                           {"corners", "slow_*"},
+                           {"parasitic", 0.4}}})}}},
+          {"exemptions",
+           json::array({{{"cells", "maj3_rep"},
+                         {"pins", "c"},
+                         {"quantity", "parasitic"},
+                         {"reason", "drain shared with the carry gate"},
+                         {"author", "M. Ober"},
+                         {"expires", "2028-02-29"}}})}};
 }
 
 TEST_F(PlanTest, TakesEverythingGivenAndSaysItAgain) {
@@ -66,7 +80,27 @@ TEST_F(PlanTest, TakesEverythingGivenAndSaysItAgain) {
   EXPECT_TRUE(plan->all_side_vectors);
   EXPECT_EQ(plan->tolerance.effort, 0.1);
   EXPECT_EQ(plan->tolerance.parasitic, 0.2);
+  EXPECT_EQ(
+      plan->tolerance_rules,
+      (std::vector<ToleranceRule>{
+          {.where = {.cells = "nor*", .corners = "slow_*", .edge = Edge::kRise},
+           .effort = std::nullopt,
+           .parasitic = 0.4}}));
+  EXPECT_EQ(plan->exemptions,
+            (std::vector<Exemption>{
+                {.where = {.cells = "maj3_rep", .pins = "c", .edge = {}},
+                 .quantity = Quantity::kParasitic,
+                 .reason = "drain shared with the carry gate",
+                 .author = "M. Ober",
+                 .expires = "2028-02-29"}}));
   EXPECT_EQ(PlanToJson(*plan), FullPlan());
+}
+
+// A store compares the texts of plans to find the run that goes on.
+TEST_F(PlanTest, NothingAgreedIsNotWritten) {
+  const json written = PlanToJson(*Load(SmallPlan()));
+  EXPECT_FALSE(written.contains("exemptions"));
+  EXPECT_FALSE(written["tolerances"].contains("rules"));
 }
 
 struct Refused {
@@ -83,7 +117,7 @@ std::vector<Refused> RefusedPlans() {
       {"fanout",
        {1, 2},
        "/: unknown key 'fanout'; known are: accuracy, cells, corners, drive, "
-       "fanouts, format, node, side_vectors, title, tolerances"},
+       "exemptions, fanouts, format, node, side_vectors, title, tolerances"},
       {"format",
        "gatedyno-plan/9",
        R"(/format: expected the value "gatedyno-plan/1"; got )"
@@ -150,7 +184,7 @@ std::vector<Refused> RefusedPlans() {
        R"(got "35 %")"},
       {"tolerances",
        {{"g", 0.1}},
-       "/tolerances: unknown key 'g'; known are: effort, parasitic"},
+       "/tolerances: unknown key 'g'; known are: effort, parasitic, rules"},
   };
 }
 
@@ -166,6 +200,86 @@ TEST_F(PlanTest, SaysWhatIsWrongAndWhere) {
     ASSERT_FALSE(loaded.ok()) << refused.message;
     EXPECT_EQ(loaded.error().kind, ErrorKind::kBadInput);
     EXPECT_EQ(loaded.error().message, File() + ": " + refused.message);
+  }
+}
+
+struct RefusedAgreement {
+  const char* json_text;
+  std::string message;
+};
+
+constexpr const char* kSigned =
+    R"("reason": "r", "author": "a", "expires": "2027-03-31")";
+
+TEST_F(PlanTest, SaysWhatIsWrongWithARule) {
+  const RefusedAgreement cases[] = {
+      {R"({"effort": 0.3})",
+       R"(/tolerances/rules: expected array; got {"effort":0.3})"},
+      {R"([{"cells": "nor*"}])",
+       "/tolerances/rules/0: key 'effort' or 'parasitic' is missing: a rule "
+       "says what it allows"},
+      {R"([{"effort": 0.3}, {"effort": -1}])",
+       "/tolerances/rules/1/effort: expected number, more than 0, at most 10; "
+       "got -1"},
+      {R"([{"edge": "up", "effort": 0.3}])",
+       R"(/tolerances/rules/0/edge: expected one of ["rise","fall"]; got "up")"},
+      {R"([{"cells": "", "effort": 0.3}])",
+       R"(/tolerances/rules/0/cells: expected string, at least 1 long; got "")"},
+      {R"([{"cell": "inv", "effort": 0.3}])",
+       "/tolerances/rules/0: unknown key 'cell'; known are: cells, corners, "
+       "edge, effort, outputs, parasitic, pins"},
+  };
+  for (const RefusedAgreement& test : cases) {
+    json plan = SmallPlan();
+    plan["tolerances"]["rules"] = json::parse(test.json_text);
+    const Result<Plan> loaded = Load(plan);
+    ASSERT_FALSE(loaded.ok()) << test.json_text;
+    EXPECT_EQ(loaded.error().kind, ErrorKind::kBadInput);
+    EXPECT_EQ(loaded.error().message, File() + ": " + test.message);
+  }
+}
+
+TEST_F(PlanTest, SaysWhatIsWrongWithAnExemption) {
+  const std::string with = kSigned;
+  const RefusedAgreement cases[] = {
+      {R"({"reason": "r", "author": "a"})",
+       "/exemptions/1: key 'expires' is missing"},
+      {R"({"reason": "r", "expires": "2027-03-31"})",
+       "/exemptions/1: key 'author' is missing"},
+      {R"({"author": "a", "expires": "2027-03-31"})",
+       "/exemptions/1: key 'reason' is missing"},
+      {R"({"reason": "", "author": "a", "expires": "2027-03-31"})",
+       R"(/exemptions/1/reason: expected string, at least 1 long; got "")"},
+      {R"({"reason": " \n", "author": "a", "expires": "2027-03-31"})",
+       "/exemptions/1/reason: must not be blank"},
+      {R"({"reason": "r", "author": "\t", "expires": "2027-03-31"})",
+       "/exemptions/1/author: must not be blank"},
+      {R"({"reason": "r", "author": "a", "expires": "31.3.2027"})",
+       R"(/exemptions/1/expires: expected a day of the calendar, as )"
+       R"("2026-12-31"; got "31.3.2027")"},
+      {R"({"reason": "r", "author": "a", "expires": "2027-02-29"})",
+       R"(/exemptions/1/expires: expected a day of the calendar, as )"
+       R"("2026-12-31"; got "2027-02-29")"},
+      {R"({"reason": "r", "author": "a", "expires": 2027})",
+       "/exemptions/1/expires: expected string, at least 1 long; got 2027"},
+      {R"({"quantity": "g", "reason": "r", "author": "a",
+           "expires": "2027-03-31"})",
+       R"(/exemptions/1/quantity: expected one of ["effort","parasitic"]; )"
+       R"(got "g")"},
+      {R"({"corner": "*", "reason": "r", "author": "a",
+           "expires": "2027-03-31"})",
+       "/exemptions/1: unknown key 'corner'; known are: author, cells, "
+       "corners, "
+       "edge, expires, outputs, pins, quantity, reason"},
+  };
+  for (const RefusedAgreement& test : cases) {
+    json plan = SmallPlan();
+    plan["exemptions"] = {json::parse("{" + with + "}"),
+                          json::parse(test.json_text)};
+    const Result<Plan> loaded = Load(plan);
+    ASSERT_FALSE(loaded.ok()) << test.json_text;
+    EXPECT_EQ(loaded.error().kind, ErrorKind::kBadInput);
+    EXPECT_EQ(loaded.error().message, File() + ": " + test.message);
   }
 }
 

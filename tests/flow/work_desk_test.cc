@@ -229,5 +229,22 @@ TEST(WorkDeskTest, AnOutcomeCountsOnce) {
   EXPECT_TRUE(store.FindMeasured("unasked")->has_value());
 }
 
+TEST(WorkDeskTest, ReadOnlySavesNothing) {
+  TableRunner runner = TestRunner();
+  Store store = MemoryStore();
+  Store other = MemoryStore();
+  ASSERT_TRUE(
+      other.SaveOutcome(JobOf("c"), MeasuredOutcome({{"delay", 3e-12}})).ok());
+  WorkDesk desk(&runner, &store, {.read_only = true, .reuse = {&other}});
+  Asker asker(&desk, {"a", "bad", "c"});
+  ASSERT_TRUE(asker.Work().ok());
+  EXPECT_EQ(asker.ends(),
+            (std::map<std::string, int>{{"a", 1}, {"bad", 1}, {"c", 1}}));
+  ExpectCounts(desk, 3, 1, 2, 1);
+  for (const char* key : {"a", "bad", "c"}) {
+    EXPECT_FALSE(store.FindJob(key)->has_value()) << key;
+  }
+}
+
 }  // namespace
 }  // namespace gatedyno

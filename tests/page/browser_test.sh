@@ -1,5 +1,5 @@
 #!/usr/bin/env bash
-# browser_test.sh FOLDER REPORTS: the tests of page_test.mjs, on the pages of
+# browser_test.sh FOLDER REPORTS: the tests of *_test.mjs, on the pages of
 # REPORTS. Exits with 77 where a browser or its driver cannot be had. The
 # driver's packages go to FOLDER, from npm, the versions of package-lock.json.
 set -euo pipefail
@@ -19,6 +19,7 @@ if ! cmp -s "$here/package-lock.json" "$folder/installed-lock.json"; then
     skip "npm cannot fetch playwright-core and axe-core: see $folder/npm.log"
   cp "$here/package-lock.json" "$folder/installed-lock.json"
 fi
-cp "$here/page_test.mjs" "$folder"
+rm -f "$folder"/*.mjs
+cp "$here"/*.mjs "$folder"
 cd "$folder"
-REPORTS=$reports CHROMIUM=$(command -v chromium) exec node --test page_test.mjs
+REPORTS=$reports CHROMIUM=$(command -v chromium) exec node --test ./*_test.mjs

@@ -7,6 +7,8 @@ have what a reader is shown.
 """
 
 import csv
+import datetime
+import fnmatch
 import html.parser
 import json
 import math
@@ -15,17 +17,21 @@ import re
 import sys
 import xml.etree.ElementTree
 
+TODAY = datetime.date.today().isoformat()
+
 # Nine digits, rounded.
 PAGE_DATA_ERROR = 0.6e-8
 
 
 class Page(html.parser.HTMLParser):
-    """The data element, the rows of the table of arcs, and every tag seen."""
+    """The data element, the rows of the tables of arcs and of exemptions, and
+    every tag seen."""
 
     def __init__(self):
         super().__init__()
-        self.data, self.rows, self.tags = "", [], []
-        self.in_data = self.in_arcs = self.in_body = False
+        self.data, self.rows, self.exemptions, self.tags = "", [], [], []
+        self.in_data = self.in_body = False
+        self.table = None  # The rows that what follows belongs to.
 
     def handle_starttag(self, tag, attributes):
         attributes = dict(attributes)
@@ -33,13 +39,16 @@ class Page(html.parser.HTMLParser):
         if tag == "script":
             self.in_data = attributes.get("id") == "data"
         elif tag == "table":
-            self.in_arcs = attributes.get("id") == "arc-table"
+            self.table = (
+                self.rows if attributes.get("id") == "arc-table" else
+                self.exemptions if attributes.get("class") == "exemptions"
+                else None)
         elif tag == "tbody":
-            self.in_body = self.in_arcs
+            self.in_body = self.table is not None
         elif self.in_body and tag == "tr":
-            self.rows.append([])
+            self.table.append([])
         elif self.in_body and tag in ("td", "th"):
-            self.rows[-1].append("")
+            self.table[-1].append("")
 
     def handle_endtag(self, tag):
         if tag == "script":
@@ -50,8 +59,8 @@ class Page(html.parser.HTMLParser):
     def handle_data(self, text):
         if self.in_data:
             self.data += text
-        elif self.in_body and self.rows and self.rows[-1]:
-            self.rows[-1][-1] += text
+        elif self.in_body and self.table and self.table[-1]:
+            self.table[-1][-1] += text
 
 
 def same(what, a, b, error=0.0):
@@ -87,12 +96,75 @@ def expected(row):
     }
 
 
+def covers(exemption, row):
+    arc = row["arc"]
+    names = {"cells": arc["cell"], "pins": arc["pin"],
+             "outputs": arc["output"], "corners": row["corner"]}
+    return (all(fnmatch.fnmatchcase(name, exemption.get(key, "*"))
+                for key, name in names.items()) and
+            exemption.get("edge", arc["edge"]) == arc["edge"])
+
+
+def troubles(row):
+    """What is wrong with an arc: quantities, None for the arc as a whole."""
+    if row["verdict"] == "within":
+        return []
+    found = []
+    for quantity in ("effort", "parasitic"):
+        u = row[f"{quantity}_difference_expanded"]
+        if row["line"] is None or u is None:
+            return [None]
+        allowed = row["tolerance"][quantity]
+        if abs(row[f"{quantity}_difference"]) - u > allowed or u > allowed:
+            found.append(quantity)
+    return found or [None]
+
+
+def excuses(row, exemptions):
+    """By trouble, the exemption that is in force, and the one that expired."""
+    for trouble in troubles(row):
+        fit = [e for e in exemptions if covers(e, row) and
+               e.get("quantity", trouble) == trouble]
+        now = [e for e in fit if e["expires"] >= TODAY]
+        before = [] if now else fit
+        yield trouble, (now or [None])[0], (before or [None])[0]
+
+
+def is_excused(row, exemptions):
+    found = list(excuses(row, exemptions))
+    return bool(found) and all(now for _, now, _ in found)
+
+
+def note(row, exemptions):
+    """What every report says at the arc."""
+    symbols = {"effort": "g", "parasitic": "p"}
+    parts = []
+    for place, verb in ((1, "exempt"), (2, "was exempt")):
+        for exemption in exemptions:
+            told = [found[0] for found in excuses(row, exemptions)
+                    if found[place] is exemption]
+            if told:
+                of = ", ".join(symbols[q] for q in told if q)
+                parts.append(f"{of}{' ' if of else ''}{verb} until "
+                             f"{exemption['expires']}: {exemption['reason']} "
+                             f"({exemption['author']})")
+    return "; ".join(parts)
+
+
+def code_span(text):
+    inside = "".join("\\|" if c == "|" else " " if ord(c) < 32 else c
+                     for c in text)
+    longest = max([len(run) for run in re.findall("`+", text)], default=0)
+    fence, pad = "`" * (longest + 1), " " if longest else ""
+    return f"{fence}{pad}{inside}{pad}{fence}"
+
+
 def arc_text(row):
     arc = row["arc"]
     return f"{arc['pin']}->{arc['output']} {arc['edge']}"
 
 
-def check_csv(path, rows):
+def check_csv(path, rows, exemptions):
     with open(path, newline="", encoding="utf-8") as file:
         read = list(csv.DictReader(file, strict=True))
     same(f"{path}: rows", len(read), len(rows))
@@ -103,13 +175,16 @@ def check_csv(path, rows):
         same(f"{where}: cell", got["cell"], row["arc"]["cell"])
         same(f"{where}: verdict", got["verdict"], row["verdict"])
         same(f"{where}: reason", got["reason"], row["reason"])
+        same(f"{where}: excused", got["excused"],
+             "yes" if is_excused(row, exemptions) else "no")
+        same(f"{where}: exemption", got["exemption"], note(row, exemptions))
 
 
-def check_junit(path, rows):
+def check_junit(path, rows, exemptions):
     root = xml.etree.ElementTree.parse(path).getroot()
     cases = root.findall("./testsuite/testcase")
     same(f"{path}: cases", len(cases), len(rows))
-    counts = {"failure": 0, "error": 0}
+    counts = {"failure": 0, "error": 0, "skipped": 0}
     for i, (case, row) in enumerate(zip(cases, rows)):
         where = f"{path}: case {i + 1}"
         got = {p.get("name"): p.get("value") for p in case.iter("property")}
@@ -119,14 +194,18 @@ def check_junit(path, rows):
         same(f"{where}: class", case.get("classname"), cell)
         wanted = {"within": None, "beyond": "failure",
                   "not measured": "error"}[row["verdict"]]
+        wanted = "skipped" if is_excused(row, exemptions) else wanted
         for kind in counts:
             found = case.find(kind)
             same(f"{where}: {kind}", found is not None, wanted == kind)
             if found is not None:
                 counts[kind] += 1
-                same(f"{where}: reason", found.get("message"), row["reason"])
+                same(f"{where}: reason", found.get("message"),
+                     note(row, exemptions) if kind == "skipped" else
+                     row["reason"])
     same(f"{path}: failures", int(root.get("failures")), counts["failure"])
     same(f"{path}: errors", int(root.get("errors")), counts["error"])
+    same(f"{path}: skipped", int(root.get("skipped")), counts["skipped"])
 
 
 def percent(ratio):
@@ -153,7 +232,7 @@ def shown(row, none):
     return texts
 
 
-def check_markdown(path, rows):
+def check_markdown(path, rows, exemptions):
     text = path.read_text(encoding="utf-8")
     folded = text[text.index("<details><summary>"):text.rindex("</details>")]
     # The head, its rule, then one line an arc; a | of a name has a backslash.
@@ -165,6 +244,8 @@ def check_markdown(path, rows):
         for j, text in enumerate(shown(row, "-")):
             same(f"{path}: row {i + 1}, column {j + 4}", cells[3 + j], text)
         verdict = row["verdict"] + (", bent" if row["bent"] else "")
+        if note(row, exemptions):
+            verdict += ", " + code_span(note(row, exemptions))
         same(f"{path}: verdict of row {i + 1}", cells[9], verdict)
 
 
@@ -192,7 +273,7 @@ def check_page_data(path, data, rows):
                  PAGE_DATA_ERROR)
 
 
-def check_page(path, rows):
+def check_page(path, rows, exemptions):
     page = Page()
     page.feed(path.read_text(encoding="utf-8"))
     check_page_data(path, json.loads(page.data), rows)
@@ -209,16 +290,28 @@ def check_page(path, rows):
         if not cells[9].startswith(row["verdict"]):
             raise SystemExit(f"formats_agree: {path}: row {i + 1}: "
                              f"{cells[9]!r} is not {row['verdict']!r}")
+        told = cells[9].replace("\u00a0", " ").strip()
+        if not told.endswith(note(row, exemptions)):
+            raise SystemExit(f"formats_agree: {path}: row {i + 1}: "
+                             f"{told!r} does not end with "
+                             f"{note(row, exemptions)!r}")
+    same(f"{path}: exemptions", len(page.exemptions), len(exemptions))
+    for cells, exemption in zip(page.exemptions, exemptions):
+        for place, field in ((3, "expires"), (4, "reason"), (5, "author")):
+            same(f"{path}: {field}", cells[place], exemption[field])
+        same(f"{path}: expired", cells[2] == "expired",
+             exemption["expires"] < TODAY)
 
 
 def main(folder):
     for json_path in sorted(folder.glob("*.json")):
-        rows = json.loads(json_path.read_text(encoding="utf-8"))["comparisons"]
-        check_csv(json_path.with_suffix(".csv"), rows)
-        check_junit(json_path.with_suffix(".xml"), rows)
-        check_markdown(json_path.with_suffix(".md"), rows)
-        check_page(json_path.with_suffix(".html"), rows)
+        run = json.loads(json_path.read_text(encoding="utf-8"))
+        rows, exemptions = run["comparisons"], run["facts"]["exemptions"]
+        for check, suffix in ((check_csv, ".csv"), (check_junit, ".xml"),
+                              (check_markdown, ".md"), (check_page, ".html")):
+            check(json_path.with_suffix(suffix), rows, exemptions)
         print(f"{json_path.stem}: {len(rows)} arcs, the same in five formats")
 
 
-main(pathlib.Path(sys.argv[1]))
+if __name__ == "__main__":
+    main(pathlib.Path(sys.argv[1]))

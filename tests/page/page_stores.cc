@@ -12,6 +12,8 @@
 #include "harness/record/run_result_json.h"
 #include "harness/store/store.h"
 #include "tests/page/runs.h"
+#include "tests/page/wave_job.h"
+#include "tests/report/exempt_run.h"
 
 namespace gatedyno {
 namespace {
@@ -30,6 +32,11 @@ Status Save(const std::filesystem::path& path, const RunResult& result) {
   if (!run.ok()) {
     return Forward(run);
   }
+  Outcome ended;
+  ended.ending = Ending::kMeasured;
+  if (Status kept = store->SaveOutcome(WaveJob(), ended); !kept.ok()) {
+    return kept;
+  }
   size_t next = 0;
   return store->FinishRun(
       *run, RunHeadToJson(result).dump(), [&]() -> std::optional<std::string> {
@@ -46,10 +53,14 @@ int Main(const std::filesystem::path& folder) {
     const char* file;
     RunResult result;
   };
-  const Named runs[] = {{"sample.db", SampleRun()},
+  const Named runs[] = {{"sample.db", WithCircuits(SampleRun())},
                         {"hostile.db", HostileRun()},
                         {"large.db", LargeRun()},
-                        {"empty.db", RunResult()}};
+                        {"exempt.db", ExemptRun()},
+                        {"empty.db", RunResult()},
+                        {"sample_b.db", OtherRun(WithCircuits(SampleRun()))},
+                        {"hostile_b.db", OtherRun(HostileRun())},
+                        {"large_b.db", OtherRun(LargeRun())}};
   for (const Named& run : runs) {
     const Status saved = Save(folder / run.file, run.result);
     if (!saved.ok()) {

@@ -1,59 +1,16 @@
 // The report page in a browser: see browser_test.sh.
 import assert from 'node:assert/strict';
-import {readFileSync, statSync} from 'node:fs';
-import {after, before, test} from 'node:test';
+import {statSync} from 'node:fs';
+import {test} from 'node:test';
 import {pathToFileURL} from 'node:url';
-import {chromium} from 'playwright-core';
-
-const reports = process.env.REPORTS;
-const axe = readFileSync('node_modules/axe-core/axe.min.js', 'utf8');
-const FLAGS = ['--no-sandbox', '--disable-gpu', '--disable-quic',
-               '--no-first-run', '--disable-background-networking',
-               '--disable-component-update', '--disable-sync'];
-// What the page promises of 5,000 arcs, usable and written.
-const USABLE_MS = 3000;
-const MOST_BYTES = 6e6;
-// A machine that builds at the same time is this much slower.
-const PATIENCE = 3;
-
-let browser;
-before(async () => {
-  browser = await chromium.launch(
-      {executablePath: process.env.CHROMIUM, args: FLAGS});
-});
-after(() => browser.close());
-
-// Opens a report and says at the end that it was quiet: nothing on the console,
-// nothing asked of a network.
-async function withPage(run, options, body) {
-  const context = await browser.newContext(
-      {viewport: {width: 1200, height: 900}, ...options});
-  const page = await context.newPage();
-  const noise = [];
-  const address = pathToFileURL(`${reports}/${run}.html`).href;
-  page.on('console', message => noise.push(`console: ${message.text()}`));
-  page.on('pageerror', error => noise.push(`error: ${error.message}`));
-  page.on('dialog', dialog => noise.push(`dialog: ${dialog.message()}`));
-  page.on('request', request => {
-    if (request.url().split('#')[0] !== address &&
-        !request.url().startsWith('data:')) {
-      noise.push(`request: ${request.url()}`);
-    }
-  });
-  await page.goto(address + (options.hash ?? ''));
-  await body(page);
-  assert.deepEqual(noise, []);
-  await context.close();
-}
-
-const TIMEOUT = {timeout: 60000};
-const shownRows = page => page.locator('#arc-table tbody tr');
-const firstCells = (page, column) => page.$$eval('#arc-table tbody tr',
-    (rows, n) => rows.map(row => row.cells[n].textContent.trim()), column);
+import {
+  MOST_BYTES, PATIENCE, TIMEOUT, USABLE_MS, browser, cellTexts,
+  findsNoViolation, reports, shownRows, withPage
+} from './with_page.mjs';
 
 test('sorts by every column, both ways', TIMEOUT, () =>
   withPage('sample', {}, async page => {
-    const values = async () => (await firstCells(page, 4)).map(parseFloat);
+    const values = async () => (await cellTexts(page, 4)).map(parseFloat);
     const head = page.locator('th[data-key="g1"]');
     await head.getByRole('button').click();
     assert.equal(await head.getAttribute('aria-sort'), 'ascending');
@@ -156,7 +113,7 @@ test('keeps hostile names inert and readable', TIMEOUT, () =>
     assert.equal(await page.locator('script').count(), 3);
     for (const name of [NAME, 'w'.repeat(200), '\u0628\u0648\u0627\u0628\u0629',
                         '\u53cd\u53ca\u9598', '{{data}}<!--']) {
-      const cells = await firstCells(page, 0);
+      const cells = await cellTexts(page, 0);
       assert.equal(cells.filter(cell => cell === name).length,
           name === NAME ? 3 : 2, name);
     }
@@ -214,15 +171,12 @@ for (const [name, run, options] of [
   ['dark', 'sample', {colorScheme: 'dark'}],
   ['390 px wide', 'sample', {viewport: {width: 390, height: 800}}],
   ['hostile', 'hostile', {}],
+  ['exemptions, dark', 'exempt', {colorScheme: 'dark'}],
+  ['exemptions, 390 px wide', 'exempt', {viewport: {width: 390, height: 800}}],
   ['empty', 'empty', {}],
 ]) {
   test(`axe finds nothing: ${name}`, TIMEOUT, () =>
-    withPage(run, options, async page => {
-      await page.evaluate(axe);
-      const {violations} = await page.evaluate(() => window.axe.run());
-      assert.deepEqual(violations.map(({id, nodes}) =>
-          [id, ...nodes.slice(0, 3).map(({html}) => html)]), []);
-    }));
+    withPage(run, options, findsNoViolation));
 }
 
 test('holds 5,000 arcs', TIMEOUT, () =>

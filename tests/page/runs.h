@@ -10,6 +10,7 @@
 #include <fmt/format.h>
 
 #include "harness/record/run_result.h"
+#include "tests/page/circuits.h"
 #include "tests/report/sample_run.h"
 
 namespace gatedyno {
@@ -71,6 +72,9 @@ inline RunResult HostileRun() {
   result.cells.clear();
   result.comparisons.clear();
   AddCells(names, &result);
+  for (CellSummary& cell : result.cells) {
+    cell.circuit = NamedCircuit(cell.name);
+  }
   double difference = -0.45;
   for (const std::string& name : names) {
     for (const Edge edge : {Edge::kRise, Edge::kFall}) {
@@ -79,11 +83,24 @@ inline RunResult HostileRun() {
       result.comparisons.back().arc.side = {{name, true}};
     }
   }
+  // At fanout 4: the one whose waveforms are looked for.
+  result.comparisons[1].points[3].job_key = "gone";
   Comparison failed = UnmeasuredRow();
   failed.arc.cell = names[0];
   failed.reason = names[0];
   result.comparisons.push_back(failed);
   result.warnings = {names[0], names[1]};
+  result.facts.exemptions = {
+      {.where = {.cells = names[0], .pins = names[0], .edge = {}},
+       .quantity = {},
+       .reason = names[0],
+       .author = names.back(),
+       .expires = "2999-12-31"},
+      {.where = {.edge = Edge::kRise},
+       .quantity = Quantity::kEffort,
+       .reason = names[4],
+       .author = names[2],
+       .expires = "2020-01-01"}};
   result.failed_jobs = {{"k", names[0], names[1]}};
   return result;
 }
@@ -103,6 +120,9 @@ inline RunResult LargeRun() {
     names.push_back(fmt::format("arbiter_gate_{}", i + 1));
   }
   AddCells(names, &result);
+  for (CellSummary& cell : result.cells) {
+    cell.circuit = FiveInputCircuit();
+  }
   int count = 0;
   for (int corner = 0; corner < kCorners; ++corner) {
     Calibration calibration = SampleCalibration();
@@ -121,6 +141,39 @@ inline RunResult LargeRun() {
     }
   }
   return result;
+}
+
+// `run` as another node has it: every number moved, measured by jobs of its
+// own; the last arc is gone and another has come.
+inline RunResult OtherRun(RunResult run) {
+  constexpr double kSlower = 1.5;
+  constexpr double kSpread = 0.12;
+  run.facts.node = "p65";
+  run.facts.node_title = "predictive 65 nm bulk, general purpose";
+  run.facts.started = "2024-02-03T04:05:06Z";
+  for (Calibration& calibration : run.calibrations) {
+    for (Measured* tau : {&calibration.tau_s,
+                          &calibration.tau_rise_s,
+                          &calibration.tau_fall_s}) {
+      tau->value *= kSlower;
+    }
+    calibration.fo4_s *= kSlower;
+    calibration.p_inv.value *= 1.0 + kSpread / 2;
+  }
+  int count = 0;
+  for (Comparison& row : run.comparisons) {
+    const double change = kSpread * std::sin(++count * 1.3);
+    row.effort.value *= 1.0 + change;
+    row.parasitic.value *= 1.0 - change;
+    for (Point& point : row.points) {
+      point.job_key += "of another node";
+    }
+    if (count % 5 == 1 && row.line) {
+      row.verdict = Verdict::kNotMeasured;
+    }
+  }
+  run.comparisons.back().arc.pin += "_of_b";
+  return run;
 }
 
 }  // namespace gatedyno

@@ -10,6 +10,7 @@
 #include <gtest/gtest.h>
 #include <nlohmann/json.hpp>
 
+#include "tests/report/exempt_run.h"
 #include "tests/report/sample_run.h"
 #include "tests/support/temporary_folder.h"
 
@@ -95,7 +96,7 @@ std::string At(const Rows& rows, size_t row, const std::string& column) {
 
 TEST(CsvReportTest, ReadsBack) {
   const RunResult result = RunWithHostileTexts();
-  const std::string text = CsvReport(result);
+  const std::string text = CsvReport(result, kToday);
   const Rows rows = CsvReader(text).Read();
   ASSERT_EQ(rows.size(), result.comparisons.size() + 1);
   for (size_t i = 1; i < rows.size(); ++i) {
@@ -124,7 +125,7 @@ TEST(CsvReportTest, ReadsBack) {
 }
 
 TEST(CsvReportTest, LeavesEmptyWhatWasNotMeasured) {
-  const Rows rows = CsvReader(CsvReport(SampleRun())).Read();
+  const Rows rows = CsvReader(CsvReport(SampleRun(), kToday)).Read();
   constexpr size_t kUnmeasured = 4;
   for (const char* column : {"g",
                              "g_u",
@@ -146,7 +147,7 @@ TEST(CsvReportTest, LeavesEmptyWhatWasNotMeasured) {
 TEST(CsvReportTest, AnUnknownUncertaintyIsEmpty) {
   RunResult result = SampleRun();
   result.comparisons[0].effort.u.reset();
-  const Rows rows = CsvReader(CsvReport(result)).Read();
+  const Rows rows = CsvReader(CsvReport(result, kToday)).Read();
   EXPECT_EQ(At(rows, 1, "g_u"), "");
 }
 
@@ -163,7 +164,7 @@ std::string OutputOf(const std::string& command) {
 // Another reader than ours.
 TEST(CsvReportTest, PythonReadsTheSame) {
   TemporaryFolder folder;
-  const std::string text = CsvReport(RunWithHostileTexts());
+  const std::string text = CsvReport(RunWithHostileTexts(), kToday);
   const std::string file = folder.Write("t.csv", text).string();
   const std::string script =
       folder
@@ -179,6 +180,20 @@ TEST(CsvReportTest, PythonReadsTheSame) {
     GTEST_SKIP() << "python3 is not installed";
   }
   EXPECT_EQ(nlohmann::json::parse(output).get<Rows>(), CsvReader(text).Read());
+}
+
+TEST(CsvReportTest, SaysWhatIsExempt) {
+  const Rows rows = CsvReader(CsvReport(ExemptRun(), kToday)).Read();
+  constexpr size_t kWithin = 1;
+  constexpr size_t kUnmeasured = 4;
+  constexpr size_t kBeyond = 5;
+  EXPECT_EQ(At(rows, kWithin, "excused"), "no");
+  EXPECT_EQ(At(rows, kWithin, "exemption"), "");
+  EXPECT_EQ(At(rows, kUnmeasured, "excused"), "no");
+  EXPECT_EQ(At(rows, kUnmeasured, "exemption"), kExpiredNote);
+  EXPECT_EQ(At(rows, kBeyond, "excused"), "yes");
+  EXPECT_EQ(At(rows, kBeyond, "exemption"), kExemptNote);
+  EXPECT_EQ(At(rows, kBeyond, "verdict"), "beyond");
 }
 
 }  // namespace

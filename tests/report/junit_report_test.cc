@@ -7,6 +7,7 @@
 #include <boost/property_tree/xml_parser.hpp>
 #include <gtest/gtest.h>
 
+#include "tests/report/exempt_run.h"
 #include "tests/report/sample_run.h"
 
 namespace gatedyno {
@@ -16,7 +17,7 @@ using boost::property_tree::ptree;
 
 // Read by a parser that is not ours.
 ptree Read(const RunResult& result) {
-  std::istringstream text(JunitReport(result));
+  std::istringstream text(JunitReport(result, kToday));
   ptree root;
   boost::property_tree::read_xml(text, root);
   return root.get_child("testsuites");
@@ -62,6 +63,25 @@ TEST(JunitReportTest, ACaseSaysWhatIsWrong) {
 
 TEST(JunitReportTest, AnEmptyRunHasNoSuite) {
   EXPECT_EQ(Read(RunResult()).count("testsuite"), 0U);
+}
+
+// Beyond, excused; not measured, its exemption expired.
+TEST(JunitReportTest, WhatIsExcusedIsSkipped) {
+  RunResult result = ExemptRun();
+  result.comparisons = {BeyondRow(), UnmeasuredRow()};
+  std::istringstream text(JunitReport(result, kToday));
+  ptree root;
+  boost::property_tree::read_xml(text, root);
+  const ptree& suite = root.get_child("testsuites.testsuite");
+  EXPECT_EQ(suite.get<int>("<xmlattr>.tests"), 2);
+  EXPECT_EQ(suite.get<int>("<xmlattr>.failures"), 0);
+  EXPECT_EQ(suite.get<int>("<xmlattr>.errors"), 1);
+  EXPECT_EQ(suite.get<int>("<xmlattr>.skipped"), 1);
+  const ptree& beyond = suite.get_child("testcase");
+  EXPECT_EQ(beyond.count("failure"), 0U);
+  EXPECT_EQ(beyond.get<std::string>("skipped.<xmlattr>.message"), kExemptNote);
+  EXPECT_EQ(suite.back().second.count("error"), 1U);
+  EXPECT_EQ(suite.back().second.count("skipped"), 0U);
 }
 
 }  // namespace

@@ -3,6 +3,7 @@
 #include <gmock/gmock.h>
 #include <gtest/gtest.h>
 
+#include "tests/report/exempt_run.h"
 #include "tests/report/sample_run.h"
 
 namespace gatedyno {
@@ -12,7 +13,7 @@ using ::testing::HasSubstr;
 using ::testing::Not;
 
 TEST(MarkdownReportTest, OpensWithTheVerdict) {
-  const std::string text = MarkdownReport(SampleRun());
+  const std::string text = MarkdownReport(SampleRun(), kToday);
   EXPECT_EQ(text.find("## `gates of an interrupt arbiter`\n\n**2 of 7 arcs"),
             0U);
   EXPECT_THAT(
@@ -30,7 +31,7 @@ TEST(MarkdownReportTest, OpensWithTheVerdict) {
 TEST(MarkdownReportTest, NothingStandsOpenWhereAllIsWithin) {
   RunResult result = SampleRun();
   result.comparisons = {SampleRow("inv", "a", Edge::kRise)};
-  EXPECT_THAT(MarkdownReport(result), Not(HasSubstr("Not within:")));
+  EXPECT_THAT(MarkdownReport(result, kToday), Not(HasSubstr("Not within:")));
 }
 
 TEST(MarkdownReportTest, CodeSpans) {
@@ -51,6 +52,19 @@ TEST(MarkdownReportTest, CodeSpans) {
   for (const Case& test : cases) {
     EXPECT_EQ(CodeSpan(test.text), test.span);
   }
+}
+
+TEST(MarkdownReportTest, ListsExemptionsAndMarksTheirArcs) {
+  const std::string text = MarkdownReport(ExemptRun(), kToday);
+  EXPECT_THAT(
+      text,
+      HasSubstr("Exemptions on 2026-12-02:\n\n- `nand2, pin b, fall, only g`: "
+                "in force until 2027-03-31, needed by 1 of 1 arc: `skewed on "
+                "purpose` (`M. Ober`)\n"));
+  EXPECT_THAT(
+      text, HasSubstr(std::string("| beyond, bent, `") + kExemptNote + "` |"));
+  EXPECT_THAT(text, HasSubstr(std::string("`") + kExpiredNote + "` |"));
+  EXPECT_THAT(MarkdownReport(SampleRun(), kToday), Not(HasSubstr("xempt")));
 }
 
 }  // namespace

@@ -55,8 +55,14 @@ TEST(PageStyleTest, ColoursCanBeRead) {
   const Theme dark = ThemeAfter(css, "prefers-color-scheme: dark", light);
   ASSERT_NE(light.at("paper"), dark.at("paper"));
   for (const Theme& theme : {light, dark}) {
-    for (const char* text :
-         {"ink", "quiet", "link", "within", "beyond", "unmeasured"}) {
+    for (const char* text : {"ink",
+                             "quiet",
+                             "link",
+                             "within",
+                             "beyond",
+                             "unmeasured",
+                             "rise",
+                             "fall"}) {
       for (const char* ground : {"paper", "panel"}) {
         EXPECT_GE(Contrast(theme.at(text), theme.at(ground)), kReadable)
             << text << " on " << ground << " " << theme.at("paper");

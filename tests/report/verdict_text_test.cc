@@ -66,5 +66,13 @@ TEST(VerdictTextTest, ACellIsAsItsWorstArc) {
   EXPECT_EQ(VerdictsOfCells(result).at("nand2"), Verdict::kBeyond);
 }
 
+TEST(VerdictTextTest, RulesAreNotPassedOverInSilence) {
+  RunFacts facts;
+  EXPECT_EQ(AllowedText(facts), "g 25 %, p 35 % of the hand number");
+  facts.tolerance_rules.resize(1);
+  EXPECT_EQ(AllowedText(facts),
+            "g 25 %, p 35 % of the hand number, but for 1 rule of the plan");
+}
+
 }  // namespace
 }  // namespace gatedyno

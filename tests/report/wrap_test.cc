@@ -34,6 +34,11 @@ TEST(WrapTest, BreaksAtBlanks) {
       {full + "more", Times(9, ten) + "ten\n  chars.more"},
       {full + "    more", full + "\n  more"},
       {full + "  ", full},
+      {Times(9, ten) + "allowed 35 % of it",
+       Times(9, ten) + "allowed\n  35 % of it"},
+      {Times(9, ten) + "tens: 5 %", Times(9, ten) + "tens: 5 %"},
+      {Times(97, "x") + " 5 % y", Times(97, "x") + "\n  5 % y"},
+      {Times(9, ten) + "longer 5 %)", Times(9, ten) + "longer\n  5 %)"},
       // Nowhere to break.
       {Times(130, "x"), Times(100, "x") + "\n  " + Times(30, "x")},
       {"   " + Times(100, "x"),

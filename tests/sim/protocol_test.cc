@@ -46,6 +46,35 @@ TEST(ProtocolTest, AReplyComesBackToTheLastBit) {
   EXPECT_TRUE(back->leaving);
 }
 
+TEST(ProtocolTest, WavesComeBackToTheLastBit) {
+  Reply reply;
+  reply.outcome.ending = Ending::kMeasured;
+  reply.outcome.waves = {{{"out", {0.0, 1e-12 / 3.0}, {0.1 + 0.2, -1e-9}}},
+                         {{"delay", 1e-13, 2e-13}}};
+  const Result<Reply> back = ParseReply(ReplyText(reply));
+  ASSERT_TRUE(back.ok());
+  EXPECT_EQ(back->outcome.waves, reply.outcome.waves);
+}
+
+TEST(ProtocolTest, WavesThatNoFrameCanHoldAreAFailureInWords) {
+  Reply reply;
+  reply.outcome.ending = Ending::kMeasured;
+  reply.outcome.values_s = {{"delay", 1e-12}};
+  reply.outcome.simulator_s = 0.25;
+  reply.outcome.waves = {{{std::string(kMaxFrameBytes, 'n'), {0.0}, {0.0}}},
+                         {}};
+  reply.leaving = true;
+  const std::string text = ReplyText(reply);
+  ASSERT_LE(text.size(), kMaxFrameBytes);
+  const Result<Reply> back = ParseReply(text);
+  ASSERT_TRUE(back.ok());
+  EXPECT_EQ(back->outcome.ending, Ending::kFailed);
+  EXPECT_EQ(back->outcome.message,
+            "the waveforms are 67109063 bytes long; the limit is 67108864");
+  EXPECT_EQ(back->outcome.simulator_s, 0.25);
+  EXPECT_TRUE(back->leaving);
+}
+
 TEST(ProtocolTest, BytesThatAreNoTextDoNotStopAReply) {
   Reply reply;
   reply.outcome.message = "caf\xe9 not found";
@@ -73,7 +102,7 @@ TEST(ProtocolTest, RefusesWhatIsNoHello) {
       {"ngspice", "not a hello: 'ngspice'"},
       {"[1]", "not a hello: '[1]'"},
       {R"({"protocol": 99})",
-       "the worker speaks protocol 99, this program 1: install both programs "
+       "the worker speaks protocol 99, this program 2: install both programs "
        "from one build"},
       {R"({"worker": "0.1.0"})",
        "not a hello: [json.exception.out_of_range.403] key 'protocol' not "

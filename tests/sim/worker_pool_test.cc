@@ -354,8 +354,8 @@ TEST_F(WorkerPoolTest, FailsNamingAProgramThatNeverGetsReady) {
       {"kill -KILL $$", "the worker was killed by SIGKILL before it was ready"},
       {"echo Note: no compatibility mode",
        "a frame of 1702129486 bytes is over the limit of 67108864"},
-      {"printf '\\016\\000\\000\\000{\"protocol\":2}'; sleep 9",
-       "the worker speaks protocol 2, this program 1: install both programs "
+      {"printf '\\016\\000\\000\\000{\"protocol\":3}'; sleep 9",
+       "the worker speaks protocol 3, this program 2: install both programs "
        "from one build"},
   };
   for (const StartRow& row : rows) {

@@ -28,6 +28,16 @@ TEST(JobTextTest, AMessageThatIsNotUtf8IsKept) {
   EXPECT_EQ(back->message, "singular matrix \xEF\xBF\xBD at y");
 }
 
+// Farm results are stores too, so this is the one way in.
+TEST(JobTextTest, WavesAreNeverKept) {
+  Job asking = ExampleJob(4);
+  asking.wants_waves = true;
+  EXPECT_EQ(MeasuresToText(asking), MeasuresToText(ExampleJob(4)));
+  Outcome drawn = MeasuredAs(1e-12);
+  drawn.waves = {{{"out", {0.0, 1e-12}, {0.0, 1.0}}}, {{"delay", 0.0, 1e-12}}};
+  EXPECT_EQ(OutcomeToText(drawn), OutcomeToText(MeasuredAs(1e-12)));
+}
+
 TEST(JobTextTest, WhatIsNotJsonIsAnError) {
   for (const char* text : {"", "{", "[]", "7"}) {
     EXPECT_FALSE(OutcomeFromText(text).ok()) << text;

@@ -3,6 +3,7 @@
 #include <csignal>
 #include <filesystem>
 #include <fstream>
+#include <functional>
 #include <string>
 
 #include <SQLiteCpp/SQLiteCpp.h>
@@ -66,7 +67,8 @@ ChildExit Look(const std::filesystem::path& path, int saved) {
 }
 
 // `make_room` undoes what refused the writes.
-ChildExit FillUp(const std::filesystem::path& path, void (*make_room)()) {
+ChildExit FillUp(const std::filesystem::path& path,
+                 const std::function<void()>& make_room) {
   Store store = Store::Open(path).value();
   const int saved = SaveUntilRefused(&store);
   if (saved < 0) {
@@ -113,17 +115,13 @@ TEST_F(StoreFullTest, ALimitOnTheSizeOfFiles) {
 TEST_F(StoreFullTest, AFullDisk) {
   const int ended = ExitOf(
       [](const std::filesystem::path& path) -> int {
-        static std::filesystem::path disk;
-        disk = path.parent_path();
-        return MountDisk(disk, "size=3m") ? FillUp(path,
-                                                   [] {
-                                                     ::mount("tmpfs",
-                                                             disk.c_str(),
-                                                             "tmpfs",
-                                                             MS_REMOUNT,
-                                                             "size=64m");
-                                                   })
-                                          : kNoDiskHere;
+        const std::filesystem::path disk = path.parent_path();
+        if (!MountDisk(disk, "size=3m")) {
+          return kNoDiskHere;
+        }
+        return FillUp(path, [&disk] {
+          ::mount("tmpfs", disk.c_str(), "tmpfs", MS_REMOUNT, "size=64m");
+        });
       },
       Path());
   if (ended == kNoDiskHere) {

@@ -66,6 +66,33 @@ TEST(MeasureTest, AMissingCrossingNamesItsInterval) {
   EXPECT_TRUE(outcome.values_s.empty());
 }
 
+TEST(MeasureTest, WavesAreGivenWhereTheyAreWanted) {
+  Job job = StepJob();
+  EXPECT_EQ(Measure(job, Step()).waves, std::nullopt);
+  job.wants_waves = true;
+  const Outcome outcome = Measure(job, Step());
+  ASSERT_TRUE(outcome.measured()) << outcome.message;
+  ASSERT_TRUE(outcome.waves.has_value());
+  EXPECT_EQ(outcome.waves->waveforms, Step());
+  ASSERT_EQ(outcome.waves->intervals.size(), job.intervals.size());
+  for (size_t i = 0; i < job.intervals.size(); ++i) {
+    const TimedInterval& timed = outcome.waves->intervals[i];
+    EXPECT_EQ(timed.name, job.intervals[i].name);
+    // Bit for bit: the marks of a picture are what was measured.
+    EXPECT_EQ(timed.to_s - timed.from_s, outcome.values_s.at(timed.name));
+  }
+  constexpr double kRounding = 1e-21;
+  EXPECT_NEAR(outcome.waves->intervals[0].from_s, 1.5e-9, kRounding);
+  EXPECT_NEAR(outcome.waves->intervals[0].to_s, 2.5e-9, kRounding);
+}
+
+TEST(MeasureTest, NoWavesOfWhatFailed) {
+  Job job = StepJob();
+  job.wants_waves = true;
+  job.intervals[2].to.occurrence = 2;
+  EXPECT_EQ(Measure(job, Step()).waves, std::nullopt);
+}
+
 TEST(MeasureTest, AFloatingNetComesBeforeItsDelays) {
   Job job = StepJob();
   job.swings[0].low_v = -0.1;

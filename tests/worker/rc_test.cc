@@ -1,8 +1,10 @@
 // The whole way from deck to number, against what can be worked out on paper
 // and against the simulator's own measuring.
 
+#include <algorithm>
 #include <cmath>
 #include <string>
+#include <vector>
 
 #include <gtest/gtest.h>
 
@@ -39,6 +41,16 @@ Job RcJob(Edge edge) {
   return job;
 }
 
+// On the straight line between the time points around it.
+double VoltageAt(const Waveform& waveform, double time_s) {
+  const auto after = std::upper_bound(
+      waveform.time_s.begin() + 1, waveform.time_s.end() - 1, time_s);
+  const auto i = static_cast<size_t>(after - waveform.time_s.begin());
+  const double share = (time_s - waveform.time_s[i - 1]) /
+                       (waveform.time_s[i] - waveform.time_s[i - 1]);
+  return std::lerp(waveform.voltage_v[i - 1], waveform.voltage_v[i], share);
+}
+
 // v(t) = 1 - exp(-t / RC): closed form.
 TEST(RcTest, MeetsTheClosedForm) {
   constexpr double kTolerance = 1e-3;  // Of the value: what is asked of it.
@@ -54,6 +66,31 @@ TEST(RcTest, MeetsTheClosedForm) {
       EXPECT_NEAR(outcome.values_s.at(name), value_s, kTolerance * value_s)
           << name;
     }
+  }
+}
+
+// Each mark of a picture lies on its waveform: the straight line between the
+// time points around it is at the level, to what the curve departs from it.
+TEST(RcTest, TheMarksLieOnTheWaveforms) {
+  constexpr double kDeparture_v = 1e-5;  // A step is 1/200 time constant.
+  Job job = RcJob(Edge::kFall);
+  job.intervals.erase(job.intervals.begin());  // The source steps at once.
+  job.wants_waves = true;
+  const Outcome outcome = RunJob(job, &SharedSession());
+  ASSERT_TRUE(outcome.measured()) << outcome.message;
+  ASSERT_TRUE(outcome.waves.has_value());
+  const std::vector<Waveform>& waveforms = outcome.waves->waveforms;
+  ASSERT_EQ(waveforms.size(), 1U);
+  EXPECT_EQ(waveforms[0].net, "out");
+  EXPECT_GE(waveforms[0].time_s.back(), job.stop_s * (1.0 - 1e-6));
+  for (size_t i = 0; i < job.intervals.size(); ++i) {
+    const TimedInterval& timed = outcome.waves->intervals[i];
+    EXPECT_NEAR(VoltageAt(waveforms[0], timed.from_s),
+                job.intervals[i].from.level_v,
+                kDeparture_v);
+    EXPECT_NEAR(VoltageAt(waveforms[0], timed.to_s),
+                job.intervals[i].to.level_v,
+                kDeparture_v);
   }
 }
 
