@@ -1,9 +1,9 @@
-# Writes OUTPUT, the C++ source of harness/report/page_parts.h: the files of
+# Writes OUTPUT, the C++ source of harness/page/page_parts.h: the files of
 # SOURCE as string literals, and what a content security policy knows them by.
 #
 #   cmake -DSOURCE=reports -DOUTPUT=page_parts.cc -P EmbedPage.cmake
 file(WRITE ${OUTPUT} "// Made by cmake/EmbedPage.cmake.\n\n"
-  "#include \"harness/report/page_parts.h\"\n\n"
+  "#include \"harness/page/page_parts.h\"\n\n"
   "#ifdef __clang__\n"
   "#pragma clang diagnostic ignored \"-Woverlength-strings\"\n#endif\n\n"
   "namespace gatedyno {\n")

@@ -65,11 +65,10 @@ void PrintJobs(const RunResult& result, const std::string& store) {
                                 job.key,
                                 store)));
   }
-  fmt::print("{} jobs: {} simulated, {} taken from {}, {} failed\n",
+  fmt::print("{} jobs: {} simulated, {} taken from stores, {} failed\n",
              result.jobs.wanted,
              result.jobs.simulated,
              result.jobs.reused,
-             store,
              result.jobs.failed);
 }
 

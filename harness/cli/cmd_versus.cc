@@ -17,9 +17,9 @@
 #include "harness/cli/stored_run.h"
 #include "harness/cli/value_kind.h"
 #include "harness/compare/versus.h"
+#include "harness/page/versus_page.h"
 #include "harness/report/versus_csv.h"
 #include "harness/report/versus_json.h"
-#include "harness/report/versus_page.h"
 #include "harness/report/versus_table.h"
 
 namespace gatedyno {

@@ -1,5 +1,5 @@
 // The page's data and what all parts of the scripts share.  `data` is described
-// in harness/report/page_data.h, that of two runs in versus_data.h.
+// in harness/page/page_data.h, that of two runs in versus_data.h.
 'use strict';
 
 const data = JSON.parse(document.getElementById('data').textContent);

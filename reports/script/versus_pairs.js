@@ -1,7 +1,7 @@
 // The table of arcs of two runs: what its columns sort by, and its filters.
 'use strict';
 
-// An arc's figure; see harness/report/versus_data.h.
+// An arc's figure; see harness/page/versus_data.h.
 const IN_A = 0, IN_B = 1, CHANGE = 2, CHANGE_EXPANDED = 3;
 const FINDINGS = ['same jobs', 'alike', 'uncertainty unknown', 'not measured',
                   'bent, other fanouts', 'changed'];

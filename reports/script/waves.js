@@ -1,5 +1,5 @@
 // Waveforms, with what was measured on them: a picture an arc that they were
-// asked for. `waves` is described in harness/report/waves_data.h.
+// asked for. `waves` is described in harness/page/waves_data.h.
 'use strict';
 
 const waves = JSON.parse(element('waves-data')?.textContent ?? '[]');

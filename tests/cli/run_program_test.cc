@@ -42,14 +42,14 @@ TEST(RunProgramTest, MeasuresOnceAndReportsInEveryForm) {
   EXPECT_EQ(first.err, "");
   EXPECT_THAT(first.out, HasSubstr("6 arcs: 6 within, 0 beyond, 0 not "));
   EXPECT_THAT(first.out,
-              ContainsRegex("[0-9]+ jobs: [0-9]+ simulated, 0 taken from my "
-                            "store.db, 0 failed\n"));
+              ContainsRegex("[0-9]+ jobs: [0-9]+ simulated, 0 taken from "
+                            "stores, 0 failed\n"));
 
   const Ended second = program.Run(arguments);
   EXPECT_EQ(second.exit_code, 0);
   EXPECT_THAT(second.out,
-              ContainsRegex("[0-9]+ jobs: 0 simulated, [0-9]+ taken from my "
-                            "store.db, 0 failed\n"));
+              ContainsRegex("[0-9]+ jobs: 0 simulated, [0-9]+ taken from "
+                            "stores, 0 failed\n"));
   // The same figures, to the last digit shown.
   EXPECT_EQ(second.out.substr(0, second.out.find(" jobs: ")),
             first.out.substr(0, first.out.find(" jobs: ")));
@@ -115,7 +115,7 @@ TEST(RunProgramTest, ExitCodeThreeWhereJobsFail) {
               HasSubstr("failed: reference inverter a->y h=1 typical: "));
   EXPECT_THAT(ended.out,
               HasSubstr("3 jobs: 3 simulated, 0 taken from "
-                        "gatedyno.db, 3 failed\n"));
+                        "stores, 3 failed\n"));
 }
 
 TEST(RunProgramTest, PlanNodeAndCellsLieBesideEachOther) {

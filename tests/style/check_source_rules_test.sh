@@ -35,7 +35,7 @@ expect() {
   fi
 }
 
-order='base record netlist network node effort deck sim worker store farm fit compare report flow cli'
+order='base record netlist network node effort deck sim worker store farm fit compare report page flow cli'
 
 fresh_tree
 expect 0 ''
@@ -57,8 +57,13 @@ write tests/sim/pool_test.cc '#include "gates.h"'
 expect 1 'tests/sim/pool_test.cc:1: include by full path from the repository root'
 
 fresh_tree
-write harness/store/store.h '#include <sqlite3.h>'
-expect 1 'harness/store/store.h:1: sqlite3.h belongs to harness/store/*.cc only'
+write harness/base/file.h '#include <string>'
+write harness/base/file.cc $'// A file.\n#include <string>\n#include "harness/base/file.h"'
+expect 1 'harness/base/file.cc:2: its own header comes first, which shows that it compiles alone'
+
+fresh_tree
+write harness/store/row.h '#include <sqlite3.h>'
+expect 1 'harness/store/row.h:1: sqlite3.h belongs to harness/store/*.cc only'
 
 fresh_tree
 write harness/sim/pool.cc '#include <ngspice/sharedspice.h>'
