@@ -12,8 +12,7 @@
 #include "harness/cli/interrupt.h"
 #include "harness/cli/progress_line.h"
 #include "harness/flow/characterize.h"
-#include "harness/record/comparison_json.h"
-#include "harness/record/run_result_json.h"
+#include "harness/store/finish_run.h"
 #include "harness/store/run_lock.h"
 #include "harness/store/store.h"
 
@@ -94,19 +93,6 @@ class ProgressNotes {
   std::chrono::steady_clock::time_point last_;
 };
 
-Status KeepResults(RunId run, const RunResult& result, Store* store) {
-  size_t next = 0;
-  return store->FinishRun(
-      run,
-      JsonText(RunHeadToJson(result)),
-      [&]() -> std::optional<std::string> {
-        if (next == result.comparisons.size()) {
-          return std::nullopt;
-        }
-        return JsonText(ComparisonToJson(result.comparisons[next++]));
-      });
-}
-
 }  // namespace
 
 std::string ProgramVersion() {
@@ -161,7 +147,7 @@ Result<RunResult> RunInSession(const PreparedRun& prepared,
   }
   result->facts.program = ProgramVersion();
   result->facts.started = Utc(record->started);
-  const Status kept = KeepResults(record->id, *result, &*store);
+  const Status kept = FinishRun(record->id, *result, &*store);
   return kept.ok() ? std::move(result) : Forward(kept);
 }
 

@@ -11,8 +11,7 @@
 
 #include "harness/base/file.h"
 #include "harness/cli/commands.h"
-#include "harness/record/comparison_json.h"
-#include "harness/record/run_result_json.h"
+#include "harness/store/finish_run.h"
 #include "harness/store/store.h"
 #include "tests/report/sample_run.h"
 #include "tests/support/temporary_folder.h"
@@ -39,19 +38,8 @@ class ReportCommandTest : public testing::Test {
   }
 
   void Finish(RunId run, const RunResult& result) {
-    size_t next = 0;
-    ASSERT_TRUE(
-        Store::Open(Path())
-            ->FinishRun(
-                run,
-                RunHeadToJson(result).dump(),
-                [&]() -> std::optional<std::string> {
-                  if (next == result.comparisons.size()) {
-                    return std::nullopt;
-                  }
-                  return ComparisonToJson(result.comparisons[next++]).dump();
-                })
-            .ok());
+    Store store = Store::Open(Path()).value();
+    ASSERT_TRUE(FinishRun(run, result, &store).ok());
   }
 
   Result<ExitCode> Report(std::vector<std::string> words) {

@@ -10,8 +10,7 @@
 
 #include "harness/base/file.h"
 #include "harness/cli/commands.h"
-#include "harness/record/comparison_json.h"
-#include "harness/record/run_result_json.h"
+#include "harness/store/finish_run.h"
 #include "harness/store/store.h"
 #include "tests/report/sample_versus.h"
 #include "tests/support/temporary_folder.h"
@@ -38,19 +37,7 @@ class VersusCommandTest : public testing::Test {
                                       .program_version = "gatedyno 0.1.0",
                                       .simulator_version = "simulator 1"})
                           .value();
-    size_t next = 0;
-    ASSERT_TRUE(
-        store
-            ->FinishRun(
-                run,
-                RunHeadToJson(result).dump(),
-                [&]() -> std::optional<std::string> {
-                  if (next == result.comparisons.size()) {
-                    return std::nullopt;
-                  }
-                  return ComparisonToJson(result.comparisons[next++]).dump();
-                })
-            .ok());
+    ASSERT_TRUE(FinishRun(run, result, &*store).ok());
   }
 
   Result<ExitCode> Versus(std::vector<std::string> words) {

@@ -6,6 +6,7 @@
 #include <gtest/gtest.h>
 
 #include "harness/page/circuit_svg.h"
+#include "tests/page/count.h"
 #include "tests/support/test_circuit.h"
 
 namespace gatedyno {
@@ -16,15 +17,6 @@ using ::testing::Not;
 
 CellSummary Nand2() {
   return {"nand2", {"y = !(a & b)"}, 1, 2, 1, Nand2Circuit()};
-}
-
-size_t Count(const std::string& text, const std::string& what) {
-  size_t count = 0;
-  for (size_t at = text.find(what); at != std::string::npos;
-       at = text.find(what, at + 1)) {
-    ++count;
-  }
-  return count;
 }
 
 TEST(PageCircuitTest, HasEveryDevice) {

@@ -8,8 +8,7 @@
 
 #include <fmt/format.h>
 
-#include "harness/record/comparison_json.h"
-#include "harness/record/run_result_json.h"
+#include "harness/store/finish_run.h"
 #include "harness/store/store.h"
 #include "tests/page/runs.h"
 #include "tests/page/wave_job.h"
@@ -37,14 +36,7 @@ Status Save(const std::filesystem::path& path, const RunResult& result) {
   if (Status kept = store->SaveOutcome(WaveJob(), ended); !kept.ok()) {
     return kept;
   }
-  size_t next = 0;
-  return store->FinishRun(
-      *run, RunHeadToJson(result).dump(), [&]() -> std::optional<std::string> {
-        return next == result.comparisons.size()
-                   ? std::nullopt
-                   : std::optional(
-                         ComparisonToJson(result.comparisons[next++]).dump());
-      });
+  return FinishRun(*run, result, &*store);
 }
 
 int Main(const std::filesystem::path& folder) {

@@ -6,6 +6,7 @@
 #include <gtest/gtest.h>
 
 #include "harness/page/page_parts.h"
+#include "tests/page/count.h"
 #include "tests/report/sample_run.h"
 
 namespace gatedyno {
@@ -16,15 +17,6 @@ using ::testing::Not;
 
 const RunSource kSource = {
     .store = "arbiter.db", .run = 3, .plan = R"({"node":"p45"})"};
-
-size_t Count(const std::string& text, const std::string& what) {
-  size_t count = 0;
-  for (size_t at = text.find(what); at != std::string::npos;
-       at = text.find(what, at + 1)) {
-    ++count;
-  }
-  return count;
-}
 
 TEST(PageTest, SaysWhatTheReadersAsk) {
   const std::string page = Page(SampleRun(), kSource);

@@ -11,6 +11,7 @@
 #include "harness/page/page_parts.h"
 #include "harness/page/versus_data.h"
 #include "harness/page/versus_lists.h"
+#include "tests/page/count.h"
 #include "tests/report/sample_versus.h"
 
 namespace gatedyno {
@@ -18,15 +19,6 @@ namespace {
 
 using ::testing::HasSubstr;
 using ::testing::Not;
-
-size_t Count(const std::string& text, const std::string& what) {
-  size_t count = 0;
-  for (size_t at = text.find(what); at != std::string::npos;
-       at = text.find(what, at + 1)) {
-    ++count;
-  }
-  return count;
-}
 
 TEST(VersusPageTest, SaysWhatTheReadersAsk) {
   const SampleVersus sample;
