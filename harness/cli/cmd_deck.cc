@@ -95,7 +95,8 @@ Status WriteDecks(const PreparedRun& run,
   }
   const CalibrationSet calibrated =
       CalibrateCorners(run, *references, sample.DelayUncertainty());
-  for (const auto& [corner, reason] : calibrated.failures) {
+  if (!calibrated.failures.empty()) {
+    const auto& [corner, reason] = *calibrated.failures.begin();
     return Unavailable(fmt::format("corner {}: {}", corner, reason));
   }
   for (const auto& [name, calibration] : calibrated.by_corner) {

@@ -127,9 +127,10 @@ const meanBars = (stats, theme) => ({
   },
 });
 
-// "fall, pull-down 2 high" as "fall" above "2 high".
+// "fall, pull-down 2 high" as "fall" above "2" above "high": narrow enough for
+// all of them to stand side by side on a telephone.
 const outputLabel = name =>
-  (name ?? '').replace(/pull-(down|up) /, '').replace(', ', '\n');
+  (name ?? '').replace(/pull-(down|up) /, '').replace(/,? /g, '\n');
 
 // Neighbours are moved aside by turns, so that few marks hide each other.
 function stackOptions() {
@@ -139,13 +140,13 @@ function stackOptions() {
   return theme => ({
     animation: false,
     textStyle: {fontFamily: FONT, color: theme.ink},
-    grid: {left: 56, right: 16, top: 18, bottom: 62},
+    grid: {left: 56, right: 16, top: 18, bottom: 70},
     tooltip: tooltip(theme, describePoint),
     xAxis: axis(theme, '', {
       min: -1, max: data.outputs.length, interval: 1,
       splitLine: {show: false}, axisTick: {show: false},
-      axisLabel: {color: theme.quiet, fontFamily: FONT, hideOverlap: true,
-                  lineHeight: 15,
+      axisLabel: {color: theme.quiet, fontFamily: FONT, hideOverlap: false,
+                  lineHeight: 14,
                   formatter: place => outputLabel(data.outputs[place])},
     }),
     yAxis: axis(theme, 'change of g, %', {
