@@ -132,7 +132,7 @@ Status WriteAll(const Options& options, const VersusView& view) {
   };
   for (const Output& output : outputs) {
     if (output.file) {
-      const Status written = WriteFile(*output.file, output.text(view));
+      Status written = WriteFile(*output.file, output.text(view));
       if (!written.ok()) {
         return written;
       }

@@ -143,6 +143,7 @@ std::vector<ArcGroup> GroupByStack(const Versus& versus, const RunResult& run) {
     groups[KeyOf(versus.arcs[i].a->arc, cells)].push_back(i);
   }
   std::vector<ArcGroup> named;
+  named.reserve(groups.size());
   for (auto& [key, places] : groups) {
     named.push_back({GroupName(key), std::move(places)});
   }

@@ -9,7 +9,7 @@ namespace gatedyno {
 
 // Less than a pixel of a picture of a supply, and a tenth of what could be
 // mistaken for a feature of the circuit.
-inline constexpr double kUnseen_v = 1e-3;
+inline constexpr double kUnseenV = 1e-3;
 
 // Those points of `waveform` from `from_s` to `to_s`, and the next one on
 // either side, without which straight lines would depart from one of them by
@@ -20,7 +20,7 @@ inline constexpr double kUnseen_v = 1e-3;
 Waveform ThinOut(const Waveform& waveform,
                  double from_s,
                  double to_s,
-                 double tolerance_v = kUnseen_v);
+                 double tolerance_v = kUnseenV);
 
 }  // namespace gatedyno
 

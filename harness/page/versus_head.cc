@@ -2,6 +2,7 @@
 
 #include <cmath>
 #include <cstddef>
+#include <iterator>
 #include <optional>
 #include <string_view>
 #include <vector>
@@ -136,12 +137,12 @@ std::string SpreadRow(const std::string& name,
       LargestCell(versus, spread, change));
 }
 
-const std::vector<std::string_view> kSpreadHeads = {
+constexpr std::string_view kSpreadHeads[] = {
     "arcs", "mean", "standard deviation", "within 10 %"};
 
 std::string SpreadHeads(std::string_view first) {
   std::vector<std::string_view> names = {first};
-  names.insert(names.end(), kSpreadHeads.begin(), kSpreadHeads.end());
+  names.insert(names.end(), std::begin(kSpreadHeads), std::end(kSpreadHeads));
   return Heads(names) + "<th scope=\"col\" class=\"words\">the largest</th>";
 }
 

@@ -17,7 +17,7 @@ nlohmann::json CircuitToJson(const Circuit& circuit) {
 }
 
 Circuit ReadCircuit(const nlohmann::json& from) {
-  const Circuit circuit = from.get<Circuit>();
+  auto circuit = from.get<Circuit>();
   for (const CircuitStage& stage : circuit.stages) {
     for (const size_t device : stage.devices) {
       if (device >= circuit.devices.size()) {

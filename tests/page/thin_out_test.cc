@@ -37,7 +37,7 @@ double VoltageAt(const Waveform& waveform, double time_s) {
 TEST(ThinOutTest, DepartsNowhereByMoreThanAskedFor) {
   const Waveform edge = GateEdge();
   size_t before = edge.time_s.size();
-  for (const double tolerance_v : {1e-4, kUnseen_v, 1e-2}) {
+  for (const double tolerance_v : {1e-4, kUnseenV, 1e-2}) {
     const Waveform thin = ThinOut(edge, 0, kEnd_s, tolerance_v);
     EXPECT_EQ(thin.net, "y");
     EXPECT_LT(thin.time_s.size(), before);
