@@ -146,8 +146,6 @@ Comparison Prepare(const MeasuredArc& measured,
   return comparison;
 }
 
-constexpr Quantity kQuantities[] = {Quantity::kEffort, Quantity::kParasitic};
-
 }  // namespace
 
 Comparison Compare(const MeasuredArc& measured,

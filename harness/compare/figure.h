@@ -11,6 +11,9 @@
 
 namespace gatedyno {
 
+inline constexpr Quantity kQuantities[] = {Quantity::kEffort,
+                                           Quantity::kParasitic};
+
 struct Figure {
   Quantity quantity = Quantity::kEffort;
   double hand = 0.0;  // p in tau.

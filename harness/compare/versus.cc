@@ -8,10 +8,10 @@
 
 #include <fmt/format.h>
 
+#include "harness/compare/figure.h"
+
 namespace gatedyno {
 namespace {
-
-constexpr Quantity kQuantities[] = {Quantity::kEffort, Quantity::kParasitic};
 
 bool Contains(const std::vector<std::string>& names, const std::string& name) {
   return std::find(names.begin(), names.end(), name) != names.end();

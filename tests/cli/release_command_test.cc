@@ -1,9 +1,9 @@
 // release on stores made here; no simulator.
 
-#include <algorithm>
 #include <filesystem>
 #include <optional>
 #include <string>
+#include <utility>
 #include <vector>
 
 #include <gmock/gmock.h>
@@ -11,9 +11,9 @@
 #include <nlohmann/json.hpp>
 
 #include "harness/base/file.h"
-#include "harness/cli/commands.h"
 #include "harness/record/run_result_json.h"
 #include "harness/store/store.h"
+#include "tests/cli/run_command.h"
 #include "tests/support/temporary_folder.h"
 
 namespace gatedyno {
@@ -61,14 +61,7 @@ class ReleaseCommandTest : public testing::Test {
   }
 
   Result<ExitCode> Release(std::vector<std::string> words) {
-    CLI::App app;
-    const Action action = ReleaseCommand().add(app);
-    std::reverse(words.begin(), words.end());  // What CLI11 wants.
-    app.parse(words);
-    ::testing::internal::CaptureStdout();
-    Result<ExitCode> exit_code = action();
-    out_ = ::testing::internal::GetCapturedStdout();
-    return exit_code;
+    return RunCommandLine(ReleaseCommand(), std::move(words), &out_);
   }
 
   std::string out_;

@@ -1,18 +1,18 @@
 // report on stores made here; no simulator.
 
-#include <algorithm>
 #include <filesystem>
 #include <optional>
 #include <string>
+#include <utility>
 #include <vector>
 
 #include <gmock/gmock.h>
 #include <gtest/gtest.h>
 
 #include "harness/base/file.h"
-#include "harness/cli/commands.h"
 #include "harness/store/finish_run.h"
 #include "harness/store/store.h"
+#include "tests/cli/run_command.h"
 #include "tests/report/sample_run.h"
 #include "tests/support/temporary_folder.h"
 
@@ -43,15 +43,8 @@ class ReportCommandTest : public testing::Test {
   }
 
   Result<ExitCode> Report(std::vector<std::string> words) {
-    CLI::App app;
-    const Action action = ReportCommand().add(app);
     words.insert(words.begin(), Path());
-    std::reverse(words.begin(), words.end());  // What CLI11 wants.
-    app.parse(words);
-    ::testing::internal::CaptureStdout();
-    Result<ExitCode> exit_code = action();
-    out_ = ::testing::internal::GetCapturedStdout();
-    return exit_code;
+    return RunCommandLine(ReportCommand(), std::move(words), &out_);
   }
 
   std::string out_;

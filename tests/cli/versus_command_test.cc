@@ -1,17 +1,17 @@
 // versus on stores made here; no simulator.
 
-#include <algorithm>
 #include <optional>
 #include <string>
+#include <utility>
 #include <vector>
 
 #include <gmock/gmock.h>
 #include <gtest/gtest.h>
 
 #include "harness/base/file.h"
-#include "harness/cli/commands.h"
 #include "harness/store/finish_run.h"
 #include "harness/store/store.h"
+#include "tests/cli/run_command.h"
 #include "tests/report/sample_versus.h"
 #include "tests/support/temporary_folder.h"
 
@@ -41,14 +41,7 @@ class VersusCommandTest : public testing::Test {
   }
 
   Result<ExitCode> Versus(std::vector<std::string> words) {
-    CLI::App app;
-    const Action action = VersusCommand().add(app);
-    std::reverse(words.begin(), words.end());  // What CLI11 wants.
-    app.parse(words);
-    ::testing::internal::CaptureStdout();
-    Result<ExitCode> exit_code = action();
-    out_ = ::testing::internal::GetCapturedStdout();
-    return exit_code;
+    return RunCommandLine(VersusCommand(), std::move(words), &out_);
   }
 
   std::string out_;
